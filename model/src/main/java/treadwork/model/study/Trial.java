@@ -1,0 +1,33 @@
+package treadwork.model.study;
+
+import java.util.List;
+import java.util.Optional;
+import treadwork.model.capture.FrameRange;
+
+/**
+ * One movement capture and everything that holds for it.
+ *
+ * @param file      path relative to the study file
+ * @param condition for example "brace on"; empty where none is stated
+ * @param markerSet labels of this capture; its clusters list the markers in the same order as the subject's
+ * @param contacts  empty: found from the data; else they alone hold
+ * @param frames    empty: all
+ * @param orthoses  those of this trial's condition
+ */
+public record Trial(
+        String file,
+        String condition,
+        MarkerSet markerSet,
+        LabSettings lab,
+        BodySettings body,
+        Processing processing,
+        ResultSettings results,
+        Optional<List<ContactRule>> contacts,
+        Optional<FrameRange> frames,
+        List<Orthosis> orthoses) {
+
+    public Trial {
+        contacts = contacts.map(List::copyOf);
+        orthoses = List.copyOf(orthoses);
+    }
+}

@@ -1,0 +1,2 @@
+/** The packaged program; the window will live here. Uses all modules. */
+package treadwork.viewer;
