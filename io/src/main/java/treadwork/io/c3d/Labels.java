@@ -1,0 +1,47 @@
+package treadwork.io.c3d;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/** Labels of points or channels. */
+final class Labels {
+
+    /** Begins the label of a point that nobody named. */
+    private static final char UNNAMED = '*';
+
+    private Labels() {}
+
+    /** Exactly {@code count} texts of a list; empty where it is shorter. */
+    static List<String> of(Parameters parameters, String name, int count) {
+        List<String> labels = new ArrayList<>(parameters.texts(name, count));
+        while (labels.size() < count) {
+            labels.add("");
+        }
+        return labels;
+    }
+
+    /** Takes off a {@code subject:} prefix that all named points share; it names a person, not a place on the body. */
+    static List<String> withoutSubject(List<String> labels) {
+        String prefix = null;
+        for (String label : labels) {
+            if (label.isEmpty() || label.charAt(0) == UNNAMED) {
+                continue;
+            }
+            String own = label.substring(0, label.indexOf(':') + 1);
+            boolean other = prefix != null && !prefix.equals(own);
+            if (own.isEmpty() || other) {
+                return labels;
+            }
+            prefix = own;
+        }
+        if (prefix == null) {
+            return labels;
+        }
+        String common = prefix;
+        return labels.stream()
+                .map(label -> label.startsWith(common)
+                        ? label.substring(common.length()).strip()
+                        : label)
+                .toList();
+    }
+}
