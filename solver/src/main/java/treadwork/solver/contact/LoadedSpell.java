@@ -1,0 +1,38 @@
+package treadwork.solver.contact;
+
+import java.util.ArrayList;
+import java.util.List;
+import treadwork.model.space.ScalarSeries;
+
+/**
+ * Analog samples in which a plate is loaded without a break.
+ *
+ * @param from first sample
+ * @param end  first sample after it
+ */
+record LoadedSpell(int from, int end) {
+
+    /** No foot stands for less; what is shorter is a knock, s. */
+    static final double SHORTEST_S = 0.05;
+
+    /**
+     * The spells that begin when the push reaches {@code threshold}, end when it falls below half of it, or is not known,
+     * and last at least 50 ms (the lower second level keeps noise from ending a contact).
+     */
+    static List<LoadedSpell> find(ScalarSeries push, double threshold, double rate) {
+        List<LoadedSpell> spells = new ArrayList<>();
+        int from = -1;
+        for (int i = 0; i <= push.size(); i++) {
+            boolean on = i < push.size() && push.at(i) >= (from < 0 ? threshold : threshold / 2);
+            if (on && from < 0) {
+                from = i;
+            } else if (!on && from >= 0) {
+                if (i - from >= SHORTEST_S * rate - 1e-9) {
+                    spells.add(new LoadedSpell(from, i));
+                }
+                from = -1;
+            }
+        }
+        return spells;
+    }
+}
