@@ -47,7 +47,7 @@ class InertiaTablesTest {
         }
     }
 
-    /** Percent of body mass: de Leva 1996, Table 4; Dumas 2007, Table 2; Winter 2009, Table 4.1 (transcriptions). */
+    /** Percent of body mass: de Leva 1996, Table 4; Dumas 2007, Table 2; Winter 2009, Table 4.1 (copies). */
     @ParameterizedTest
     @CsvSource({
         "DE_LEVA_1996,FEMALE,14.78,4.81,1.29",

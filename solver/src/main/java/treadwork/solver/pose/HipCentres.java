@@ -61,17 +61,17 @@ public final class HipCentres {
         return switch (rule) {
             case HARRINGTON_2007 ->
                 "Harrington et al. 2007, J Biomech 40:595-602, equations with pelvic depth, pelvic width"
-                        + " and leg length (ASIS to medial malleolus); coefficients from concordant public transcriptions,"
+                        + " and leg length (ASIS to medial malleolus); coefficients from concordant public copies,"
                         + " abstract read, article not read";
             case HARA_2016 ->
                 "Hara et al. 2016, Sci Rep 6:37707, equations with leg length (ASIS to medial malleolus);"
-                        + " coefficients from concordant public transcriptions, not seen in the article";
+                        + " coefficients from concordant public copies, not seen in the article";
             case BELL_1989 ->
                 "Bell, Brand and Pedersen 1989, Hum Mov Sci 8:3-16, shares of pelvic width for adults;"
                         + " coefficients read in the article's abstract";
             case LEARDINI_1999 ->
                 "Leardini et al. 1999, J Biomech 32:99-103, equations with pelvic depth, pelvic width and"
-                        + " leg length (ASIS to knee plus knee to ankle); X and Z coefficients from public transcriptions,"
+                        + " leg length (ASIS to knee plus knee to ankle); X and Z coefficients from public copies,"
                         + " Y coefficient (0.096 of leg length) from memory; article not read";
             case FUNCTIONAL -> "functional fit to a movement of the hip; not offered yet";
             case MARKER -> "the place of the landmark that the marker set maps to the hip centre";
