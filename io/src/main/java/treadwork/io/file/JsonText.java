@@ -13,7 +13,8 @@ import java.util.Map;
 /** JSON that a person likes to read: two blanks a level, a key a line, lists of numbers on one line, keys in their order. */
 public final class JsonText {
 
-    private static final ObjectWriter WRITER = new ObjectMapper().writer(printer());
+    private static final ObjectMapper MAPPER = new ObjectMapper();
+    private static final ObjectWriter WRITER = MAPPER.writer(printer());
 
     private JsonText() {}
 
@@ -27,6 +28,19 @@ public final class JsonText {
             return WRITER.writeValueAsString(tree) + "\n";
         } catch (JsonProcessingException e) {
             throw new IllegalArgumentException("the tree holds what JSON cannot say", e);
+        }
+    }
+
+    /**
+     * What {@link #of} takes as part of a tree, from JSON that the program itself has made.
+     *
+     * @throws IllegalArgumentException if the text is no JSON
+     */
+    public static Object parse(String json) {
+        try {
+            return MAPPER.readTree(json);
+        } catch (JsonProcessingException e) {
+            throw new IllegalArgumentException("no JSON: " + json, e);
         }
     }
 

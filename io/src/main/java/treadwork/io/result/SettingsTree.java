@@ -44,6 +44,7 @@ final class SettingsTree {
         tree.put("contacts", StudyTree.contacts(trial.contacts()));
         tree.put("frames", trial.frames().map(StudyTree::frames).orElse(null));
         tree.put("orthoses", StudyTree.orthoses(trial.orthoses()));
+        tree.put("exchanged", StudyTree.exchanged(trial.exchanged()));
         tree.put("markerSet", markers);
         return tree;
     }

@@ -14,6 +14,7 @@ final class Expected {
             "massKg", "kg",
             "cutoffHz", "Hz",
             "longestGapS", "s",
+            "plateDelayS", "s",
             "contactThresholdN", "N",
             "heightM", "m",
             "comM", "m",

@@ -20,6 +20,7 @@ import treadwork.model.space.Inertia;
 import treadwork.model.space.Vector3;
 import treadwork.model.study.BodySettings;
 import treadwork.model.study.ContactRule;
+import treadwork.model.study.Exchange;
 import treadwork.model.study.FilterSettings;
 import treadwork.model.study.HipCentreRule;
 import treadwork.model.study.InertiaTable;
@@ -71,7 +72,8 @@ final class SettingsReader {
                 filter(processing.path("plateFilter"), defaults.plateFilter()),
                 processing.path("longestGapS").asDouble(defaults.longestGapS()),
                 processing.path("contactThresholdN").asDouble(defaults.contactThresholdN()),
-                plateZero(processing.path("plateZero")));
+                plateZero(processing.path("plateZero")),
+                processing.path("plateDelayS").asDouble(defaults.plateDelayS()));
     }
 
     static ResultSettings results(JsonNode results) {
@@ -92,6 +94,10 @@ final class SettingsReader {
 
     static List<Orthosis> orthoses(JsonNode orthoses) {
         return each(orthoses, SettingsReader::orthosis);
+    }
+
+    static List<Exchange> exchanged(JsonNode exchanged) {
+        return each(exchanged, SettingsReader::exchange);
     }
 
     static Optional<FrameRange> frames(JsonNode frames) {
@@ -161,6 +167,14 @@ final class SettingsReader {
 
     private static ContactRule contact(JsonNode rule) {
         return new ContactRule(rule.get("plate").asInt(), side(rule.get("foot")), frames(rule.path("frames")));
+    }
+
+    private static Exchange exchange(JsonNode exchange) {
+        JsonNode labels = exchange.get("labels");
+        return new Exchange(
+                labels.get(0).textValue().strip(),
+                labels.get(1).textValue().strip(),
+                frames(exchange.get("frames")).orElseThrow());
     }
 
     private static Side side(JsonNode foot) {

@@ -110,7 +110,8 @@ final class StudyResolver {
                 results,
                 SettingsReader.contacts(node.path("contacts")),
                 SettingsReader.frames(node.path("frames")),
-                worn);
+                worn,
+                SettingsReader.exchanged(node.path("exchanged")));
     }
 
     private MarkerSet trialMarkers(String pointer, MarkerSource standing) {

@@ -17,6 +17,7 @@ import treadwork.model.space.Inertia;
 import treadwork.model.space.Vector3;
 import treadwork.model.study.BodySettings;
 import treadwork.model.study.ContactRule;
+import treadwork.model.study.Exchange;
 import treadwork.model.study.FilterSettings;
 import treadwork.model.study.LabAxis;
 import treadwork.model.study.LabSettings;
@@ -67,6 +68,7 @@ public final class StudyTree {
         tree.put("longestGapS", JsonText.number(processing.longestGapS()));
         tree.put("contactThresholdN", JsonText.number(processing.contactThresholdN()));
         tree.put("plateZero", plateZero(processing.plateZero()));
+        tree.put("plateDelayS", JsonText.number(processing.plateDelayS()));
         return tree;
     }
 
@@ -100,6 +102,10 @@ public final class StudyTree {
 
     public static List<Object> orthoses(List<Orthosis> orthoses) {
         return each(orthoses, StudyTree::orthosis);
+    }
+
+    public static List<Object> exchanged(List<Exchange> exchanged) {
+        return each(exchanged, StudyTree::exchange);
     }
 
     public static List<Integer> frames(FrameRange frames) {
@@ -168,6 +174,13 @@ public final class StudyTree {
         tree.put("plate", rule.plate());
         tree.put("foot", rule.foot().key());
         rule.frames().ifPresent(frames -> tree.put("frames", frames(frames)));
+        return tree;
+    }
+
+    private static Map<String, Object> exchange(Exchange exchange) {
+        Map<String, Object> tree = new LinkedHashMap<>();
+        tree.put("labels", List.of(exchange.first(), exchange.second()));
+        tree.put("frames", frames(exchange.frames()));
         return tree;
     }
 

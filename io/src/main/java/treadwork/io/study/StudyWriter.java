@@ -125,6 +125,9 @@ public final class StudyWriter {
             tree.put("contacts", StudyTree.contacts(trial.contacts()));
         }
         trial.frames().ifPresent(frames -> tree.put("frames", StudyTree.frames(frames)));
+        if (!trial.exchanged().isEmpty()) {
+            tree.put("exchanged", StudyTree.exchanged(trial.exchanged()));
+        }
         return tree;
     }
 }

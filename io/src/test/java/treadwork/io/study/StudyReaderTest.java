@@ -25,6 +25,7 @@ import treadwork.model.space.Inertia;
 import treadwork.model.space.Vector3;
 import treadwork.model.study.BodySettings;
 import treadwork.model.study.ContactRule;
+import treadwork.model.study.Exchange;
 import treadwork.model.study.FilterSettings;
 import treadwork.model.study.HipCentreRule;
 import treadwork.model.study.InertiaTable;
@@ -112,7 +113,8 @@ class StudyReaderTest {
                                 + "\"body\": { \"hipCentre\": \"hara-2016\", \"shankAxis\": \"epicondyles\" }, \"static\":")
                 .with(
                         FIRST_TRIAL,
-                        FIRST_TRIAL + ", \"processing\": { \"contactThresholdN\": 35 }, "
+                        FIRST_TRIAL + ", \"processing\": { \"contactThresholdN\": 35, \"plateDelayS\": -0.01 }, "
+                                + "\"exchanged\": [{ \"labels\": [\"A\", \" B \"], \"frames\": [3, 9] }], "
                                 + "\"body\": { \"hipCentre\": \"leardini-1999\" }")
                 .read();
 
@@ -122,6 +124,9 @@ class StudyReaderTest {
         assertEquals(markers, nearest.processing().markerFilter());
         assertEquals(35, nearest.processing().contactThresholdN());
         assertEquals(0.2, nearest.processing().longestGapS());
+        assertEquals(-0.01, nearest.processing().plateDelayS());
+        assertEquals(List.of(new Exchange("A", "B", new FrameRange(3, 9))), nearest.exchanged());
+        assertEquals(List.of(), other.exchanged());
         assertEquals(HipCentreRule.LEARDINI_1999, nearest.body().hipCentre());
         assertEquals(ShankAxis.EPICONDYLES, nearest.body().shankAxis());
         assertEquals(InertiaTable.DUMAS_2007, nearest.body().inertia());

@@ -13,6 +13,7 @@ import treadwork.model.capture.FrameRange;
  * @param contacts  empty: found from the data; else they alone hold
  * @param frames    empty: all
  * @param orthoses  those of this trial's condition
+ * @param exchanged labels that the capture has the wrong way round, put right before anything else
  */
 public record Trial(
         String file,
@@ -24,10 +25,27 @@ public record Trial(
         ResultSettings results,
         Optional<List<ContactRule>> contacts,
         Optional<FrameRange> frames,
-        List<Orthosis> orthoses) {
+        List<Orthosis> orthoses,
+        List<Exchange> exchanged) {
 
     public Trial {
         contacts = contacts.map(List::copyOf);
         orthoses = List.copyOf(orthoses);
+        exchanged = List.copyOf(exchanged);
+    }
+
+    /** With every label on its own marker. */
+    public Trial(
+            String file,
+            String condition,
+            MarkerSet markerSet,
+            LabSettings lab,
+            BodySettings body,
+            Processing processing,
+            ResultSettings results,
+            Optional<List<ContactRule>> contacts,
+            Optional<FrameRange> frames,
+            List<Orthosis> orthoses) {
+        this(file, condition, markerSet, lab, body, processing, results, contacts, frames, orthoses, List.of());
     }
 }
