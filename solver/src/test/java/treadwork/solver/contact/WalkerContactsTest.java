@@ -109,18 +109,18 @@ class WalkerContactsTest {
         for (int k = 0; k < found.size(); k++) {
             assertEquals(expected.get(k).plate().orElseThrow(), found.get(k).plate());
             assertEquals(expected.get(k).foot(), found.get(k).foot());
-            int rise = expected.get(k).frames().first() == 1 ? 0 : 9;
-            int fall = expected.get(k).frames().last() == 660 ? 0 : 8;
+            int rise = expected.get(k).frames().first() == 1 ? 0 : 6;
+            int fall = expected.get(k).frames().last() == 660 ? 0 : 5;
             assertEquals(
                     expected.get(k).frames().first() + rise,
                     found.get(k).frames().first(),
                     1,
-                    "20 N after 45 ms");
+                    "20 N after 31 ms");
             assertEquals(
                     expected.get(k).frames().last() - fall,
                     found.get(k).frames().last(),
                     1,
-                    "10 N 40 ms before the end");
+                    "10 N 27 ms before the end");
         }
     }
 
