@@ -129,7 +129,7 @@ class ZeroingTest {
     /** The centre of pressure that the plate gives is no load: 60 mm stay 60 mm, whatever the empty plate shows. */
     @Test
     void doesNotZeroACentreOfPressure() {
-        List<Double> load = List.of(0.0, 0.0, -700.0, 60.0, -35.0, 0.0);
+        List<Double> load = List.of(5.0, -8.0, -700.0, 60.0, -35.0, 2.0);
         List<ScalarSeries> signals = new ArrayList<>();
         for (int j = 0; j < 6; j++) {
             double loaded = load.get(j);
