@@ -154,7 +154,11 @@ class ZeroingTest {
 
         assertEquals(-25, loads.plates().get(0).rawPush().at(EMPTY), ROUNDING, "N");
         assertEquals(675, loads.plates().get(0).rawPush().at(LOADED), ROUNDING, "N");
-        assertEquals(List.of(), codes(loads));
+        assertEquals(List.of("plate-zero"), codes(loads));
+        assertEquals(Severity.WARNING, loads.findings().get(0).severity());
+        assertEquals(
+                "{ \"processing\": { \"plateZero\": \"auto\" } }",
+                loads.findings().get(0).proposal().orElseThrow().json());
     }
 
     /** A plate not zeroed shows 212 N the wrong way for most of the trial; its loads still point up. */
@@ -168,7 +172,7 @@ class ZeroingTest {
         PlateLoads loads = resolve(capture, new PlateZero.None());
 
         assertEquals(500, loads.plates().get(0).rawPush().at(450), ROUNDING, "N");
-        assertEquals(List.of(), codes(loads));
+        assertEquals(List.of("plate-zero"), codes(loads));
     }
 
     @Test
