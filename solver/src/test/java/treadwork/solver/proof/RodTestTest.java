@@ -162,7 +162,7 @@ class RodTestTest {
     }
 
     private static Rod rod(double massKg) {
-        return new Rod(RodPress.MARKERS, OptionalDouble.empty(), massKg, Rod.MIDDLE);
+        return new Rod(RodPress.MARKERS, OptionalDouble.empty(), massKg, RodPress.CENTRE);
     }
 
     private static RodResult prove(Capture capture, Rod rod) {
