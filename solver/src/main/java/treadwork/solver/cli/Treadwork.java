@@ -33,6 +33,7 @@ import picocli.CommandLine.Spec;
             DemoCommand.class,
             InspectCommand.class,
             ComputeCommand.class,
+            PlatesCommand.class,
             ViewCommand.class,
             SchemaCommand.class
         })

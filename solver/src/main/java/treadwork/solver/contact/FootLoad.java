@@ -12,7 +12,8 @@ import treadwork.model.space.WrenchSeries;
  *
  * @param touching frames in which one of the foot's contacts, unfiltered or smoothed, is on
  * @param beside   those and the frames beside them that still belong to a contact
- * @param load     the sum of the smoothed loads of the foot's contacts; zero in all other frames
+ * @param load     the sum of the smoothed loads of the foot's contacts, a gap where a plate cannot tell; zero in all other
+ *                 frames
  */
 record FootLoad(BitSet touching, BitSet beside, WrenchSeries load) {
 
@@ -23,13 +24,15 @@ record FootLoad(BitSet touching, BitSet beside, WrenchSeries load) {
         for (OwnedSpell spell : owned) {
             if (spell.side() == side) {
                 BitSet raw = spell.frames(clock);
+                int reach = FilterReach.frames(spell.plate(), clock);
                 BitSet smooth = spell.smoothFrames(threshold, clock);
+                smooth.or(spell.unknownFrames(reach, clock));
                 for (int i = smooth.nextSetBit(0); i >= 0; i = smooth.nextSetBit(i + 1)) {
                     sum.add(i, spell.plate().smooth(), clock.sample(i));
                 }
                 touching.or(raw);
                 touching.or(smooth);
-                beside.or(FrameRuns.widened(raw, FilterReach.frames(spell.plate(), clock), clock.frames()));
+                beside.or(FrameRuns.widened(raw, reach, clock.frames()));
             }
         }
         beside.or(touching);

@@ -16,14 +16,16 @@ record LoadedSpell(int from, int end) {
     static final double SHORTEST_S = 0.05;
 
     /**
-     * The spells that begin when the push reaches {@code threshold}, end when it falls below half of it, or is not known,
-     * and last at least 50 ms (the lower second level keeps noise from ending a contact).
+     * The spells that begin when the push reaches {@code threshold}, end when it falls below half of it, and last at least 50
+     * ms (the lower second level keeps noise from ending a contact). Where the push is not known a spell goes on if the plate
+     * is loaded right after it, too; else it ends there.
      */
     static List<LoadedSpell> find(ScalarSeries push, double threshold, double rate) {
         List<LoadedSpell> spells = new ArrayList<>();
         int from = -1;
         for (int i = 0; i <= push.size(); i++) {
-            boolean on = i < push.size() && push.at(i) >= (from < 0 ? threshold : threshold / 2);
+            int next = from < 0 ? i : firstKnown(push, i);
+            boolean on = next < push.size() && push.at(next) >= (from < 0 ? threshold : threshold / 2);
             if (on && from < 0) {
                 from = i;
             } else if (!on && from >= 0) {
@@ -32,7 +34,17 @@ record LoadedSpell(int from, int end) {
                 }
                 from = -1;
             }
+            i = on ? next : i;
         }
         return spells;
+    }
+
+    /** The first sample from {@code i} on at which the push is known. */
+    private static int firstKnown(ScalarSeries push, int i) {
+        int known = i;
+        while (known < push.size() && Double.isNaN(push.at(known))) {
+            known++;
+        }
+        return known;
     }
 }

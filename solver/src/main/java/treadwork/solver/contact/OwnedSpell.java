@@ -37,4 +37,13 @@ record OwnedSpell(PlateLoad plate, Side side, LoadedSpell spell, int reachFrom, 
         }
         return frames;
     }
+
+    /** The frames within the smoothed load's reach in which the plate cannot tell its load. */
+    BitSet unknownFrames(int reach, Clock clock) {
+        BitSet near = FrameRuns.widened(frames(clock), reach, clock.frames());
+        near.and(clock.framesOf(reachFrom, reachEnd));
+        BitSet unknown = new BitSet();
+        near.stream().filter(i -> plate.smooth().force().isGap(clock.sample(i))).forEach(unknown::set);
+        return unknown;
+    }
 }

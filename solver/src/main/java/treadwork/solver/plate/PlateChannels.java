@@ -1,8 +1,8 @@
 package treadwork.solver.plate;
 
-import java.util.Arrays;
 import java.util.BitSet;
 import java.util.List;
+import java.util.stream.IntStream;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.Plate;
 import treadwork.model.capture.PlateType;
@@ -48,9 +48,28 @@ final class PlateChannels {
         return size;
     }
 
+    int count() {
+        return signals.length;
+    }
+
+    /** Not a copy; nobody writes to it. */
+    double[] signal(int j) {
+        return signals[j];
+    }
+
     /** Whether no signal ever changes. */
     boolean isFlat() {
-        return Arrays.stream(signals).allMatch(signal -> Arrays.stream(signal).allMatch(value -> value == signal[0]));
+        return IntStream.range(0, signals.length).allMatch(this::isFlat);
+    }
+
+    /** Whether that signal never changes. */
+    boolean isFlat(int j) {
+        for (double value : signals[j]) {
+            if (value != signals[j][0]) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /**
@@ -70,7 +89,8 @@ final class PlateChannels {
         return new PlateChannels(plate, zeroed, size);
     }
 
-    private boolean isPlace(int j) {
+    /** Whether the signal is a centre of pressure. */
+    boolean isPlace(int j) {
         return plate.type() == PlateType.FORCE_AND_CENTRE_OF_PRESSURE && (j == COP_X || j == COP_Y);
     }
 

@@ -1,10 +1,14 @@
 package treadwork.solver.plate;
 
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.BitSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.Plate;
+import treadwork.model.capture.PlateType;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.Severity;
 import treadwork.model.space.ScalarSeries;
@@ -12,6 +16,7 @@ import treadwork.model.space.Vector3;
 import treadwork.model.space.WrenchSeries;
 import treadwork.model.study.LabAxis;
 import treadwork.model.study.Processing;
+import treadwork.solver.filter.RunEnds;
 import treadwork.solver.filter.SmoothedWrench;
 import treadwork.solver.filter.Smoothing;
 
@@ -37,17 +42,20 @@ public record PlateLoads(List<PlateLoad> plates, List<Finding> findings) {
     public static PlateLoads resolve(Capture capture, List<Plate> plates, LabAxis up, Processing settings) {
         List<PlateLoad> loads = new ArrayList<>();
         List<Finding> findings = new ArrayList<>();
+        List<ChannelNoise> noises = new ArrayList<>();
         for (int i = 0; i < plates.size(); i++) {
-            Bench bench = new Bench(capture, i + 1, up.direction(), settings);
-            bench.load(plates.get(i), findings).ifPresent(loads::add);
+            Bench bench = new Bench(capture, plates, i + 1, up.direction(), settings);
+            bench.load(findings, noises).ifPresent(loads::add);
         }
+        findings.addAll(ChannelNoise.among(noises));
         return new PlateLoads(loads, findings);
     }
 
-    /** What resolving one plate needs besides the plate. */
-    private record Bench(Capture capture, int number, Vector3 up, Processing settings) {
+    /** What resolving one plate needs. */
+    private record Bench(Capture capture, List<Plate> plates, int number, Vector3 up, Processing settings) {
 
-        private Optional<PlateLoad> load(Plate plate, List<Finding> findings) {
+        private Optional<PlateLoad> load(List<Finding> findings, List<ChannelNoise> noises) {
+            Plate plate = plates.get(number - 1);
             PlateAxes axes = PlateAxes.of(plate);
             if (!axes.describe(plate) || !axes.isFloor(up)) {
                 findings.add(PlateAxes.unusable(plate, where()));
@@ -61,22 +69,57 @@ public record PlateLoads(List<PlateLoad> plates, List<Finding> findings) {
             if (channels.isFlat()) {
                 findings.add(dead());
             }
-            SensorOrigin origin = SensorOrigin.of(plate, axes.side(up), where());
-            origin.finding().ifPresent(findings::add);
-            PlateTop top = axes.top(plate, up);
-            WrenchSeries raw =
-                    mended(channels, ChannelMatrix.inPlate(plate, origin.used()), new Place(axes, top), findings);
-            SmoothedWrench smooth = Smoothing.smooth(raw, settings.plateFilter(), capture.analogRate());
-            return Optional.of(new PlateLoad(number, top, raw, smooth.series(), smooth.cutoffHz()));
+            MeasuredPlate measured = measured(plate, channels, axes, findings);
+            ChannelChecks checks = ChannelChecks.of(measured, axes);
+            findings.addAll(checks.findings());
+            noises.addAll(checks.noises());
+            return checks.unusable()
+                    ? Optional.empty()
+                    : Optional.of(smoothed(measured.load(), axes.top(plate, up), checks.unknown()));
         }
 
-        private WrenchSeries mended(PlateChannels channels, ChannelMatrix stored, Place place, List<Finding> findings) {
-            double side = place.axes.side(up);
+        /**
+         * The load filtered as recorded, then blanked where a channel was at its rail: what is recorded there is nearer the truth
+         * than the odd reflection at a gap would be. Beside it the filter mixes it in, for about a time constant.
+         */
+        private PlateLoad smoothed(WrenchSeries load, PlateTop top, BitSet unknown) {
+            SmoothedWrench smooth = Smoothing.smooth(load, settings.plateFilter(), capture.analogRate());
+            int reach = RunEnds.frames(smooth.cutoffHz(), capture.analogRate());
+            return new PlateLoad(
+                    number,
+                    top,
+                    blanked(load, unknown, 0),
+                    blanked(smooth.series(), unknown, reach),
+                    smooth.cutoffHz());
+        }
+
+        private static WrenchSeries blanked(WrenchSeries load, BitSet samples, int reach) {
+            if (samples.isEmpty()) {
+                return load;
+            }
+            UnaryOperator<double[]> blank = values -> {
+                for (Stretch run : Stretch.of(samples)) {
+                    int end = Math.min(values.length, run.end() + reach);
+                    Arrays.fill(values, Math.max(0, run.from() - reach), end, Double.NaN);
+                }
+                return values;
+            };
+            return new WrenchSeries(
+                    load.point(),
+                    load.force().eachComponent(blank),
+                    load.moment().eachComponent(blank));
+        }
+
+        private MeasuredPlate measured(Plate plate, PlateChannels channels, PlateAxes axes, List<Finding> findings) {
+            SensorOrigin origin = SensorOrigin.of(plate, axes.side(up), where());
+            origin.finding().ifPresent(findings::add);
+            ChannelMatrix stored = ChannelMatrix.inPlate(plate, origin.used());
+            double side = axes.side(up);
             double leastLoad = settings.contactThresholdN() / 2;
             double rate = capture.analogRate();
             ScalarSeries push = channels.push(stored, side);
             Optional<QuietLevel> level =
-                    UnloadedSamples.find(push, rate, leastLoad, new Surroundings(capture, place.top));
+                    UnloadedSamples.find(push, rate, leastLoad, new Surroundings(capture, axes.top(plate, up)));
             Zeroing zeroing = Zeroing.of(
                     settings.plateZero(), channels, new Zeroing.Signal(capture, where(), push, leastLoad, level));
             zeroing.finding().ifPresent(findings::add);
@@ -85,7 +128,26 @@ public record PlateLoads(List<PlateLoad> plates, List<Finding> findings) {
             if (sign.isReversed()) {
                 findings.add(sign.finding(where()));
             }
-            return zeroing.channels().load(sign.isReversed() ? stored.negated() : stored, place.axes);
+            ChannelMatrix matrix = sign.isReversed() ? stored.negated() : stored;
+            double left = sign.isReversed() ? -zeroing.unloaded() : zeroing.unloaded();
+            return new MeasuredPlate(
+                    new MeasuredPlate.Bench(capture, plates, number, settings.contactThresholdN()),
+                    plate,
+                    channels,
+                    matrix,
+                    plate.type() == PlateType.FOUR_SENSORS
+                            ? new Vector3(0, 0, origin.used().z())
+                            : origin.used(),
+                    zeroing.channels().load(matrix, axes),
+                    zeroing.channels().push(matrix, side).map(values -> less(values, left)),
+                    level.isPresent());
+        }
+
+        private static double[] less(double[] values, double level) {
+            for (int i = 0; i < values.length; i++) {
+                values[i] -= level;
+            }
+            return values;
         }
 
         private String where() {
@@ -112,6 +174,4 @@ public record PlateLoads(List<PlateLoad> plates, List<Finding> findings) {
                     "Check that the plate was switched on, if it was stepped on");
         }
     }
-
-    private record Place(PlateAxes axes, PlateTop top) {}
 }

@@ -6,6 +6,7 @@ import java.util.Optional;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.FrameRange;
 import treadwork.model.finding.Finding;
+import treadwork.model.finding.Proposal;
 import treadwork.model.finding.Severity;
 import treadwork.model.space.ScalarSeries;
 import treadwork.model.study.PlateZero;
@@ -18,6 +19,9 @@ import treadwork.model.study.PlateZero;
  * @param finding  what was taken off, or why nothing was
  */
 record Zeroing(PlateChannels channels, double unloaded, Optional<Finding> finding) {
+
+    private static final Proposal ZERO_BY_ITSELF =
+            new Proposal(Proposal.Scope.TRIAL, "{ \"processing\": { \"plateZero\": \"auto\" } }");
 
     /**
      * What zeroing looks at.
@@ -36,7 +40,8 @@ record Zeroing(PlateChannels channels, double unloaded, Optional<Finding> findin
         }
         if (rule instanceof PlateZero.None) {
             double unloaded = signal.level.map(QuietLevel::level).orElse(0.0);
-            return new Zeroing(channels, unloaded, Optional.empty());
+            boolean off = Math.abs(unloaded) > signal.leastLoad;
+            return new Zeroing(channels, unloaded, off ? Optional.of(leftIn(unloaded, signal)) : Optional.empty());
         }
         Optional<FrameRange> range =
                 rule instanceof PlateZero.Frames frames ? Optional.of(frames.range()) : signal.capture.plateZero();
@@ -70,6 +75,21 @@ record Zeroing(PlateChannels channels, double unloaded, Optional<Finding> findin
         return new Zeroing(channels.zeroedOver(samples), missed, finding);
     }
 
+    private static Finding leftIn(double unloaded, Signal signal) {
+        return new Finding(
+                        "plate-zero",
+                        Severity.WARNING,
+                        signal.where,
+                        String.format(
+                                Locale.ROOT,
+                                "unloaded, the plate shows %.1f N along its normal, limit %.1f N, and plateZero says to leave it",
+                                Math.abs(unloaded),
+                                signal.leastLoad),
+                        "All loads of this plate are off by this much, and the centre of pressure most where the force is small",
+                        "Set plateZero to auto")
+                .proposing(ZERO_BY_ITSELF);
+    }
+
     private static Finding takenOff(double taken, Signal signal) {
         return new Finding(
                 "plate-zero",
@@ -97,29 +117,31 @@ record Zeroing(PlateChannels channels, double unloaded, Optional<Finding> findin
 
     private static Finding loadedThere(double taken, double missed, Signal signal) {
         return new Finding(
-                "plate-zero",
-                Severity.WARNING,
-                signal.where,
-                String.format(
-                        Locale.ROOT,
-                        "in the frames stated for zeroing the plate shows %.1f N along its normal, %.1f N off its unloaded level",
-                        Math.abs(taken),
-                        Math.abs(missed)),
-                "The plate was loaded in these frames, so all its loads are off by this much",
-                "Set plateZero to auto, or to frames in which the plate is empty");
+                        "plate-zero",
+                        Severity.WARNING,
+                        signal.where,
+                        String.format(
+                                Locale.ROOT,
+                                "in the frames stated for zeroing the plate shows %.1f N along its normal, %.1f N off its unloaded level",
+                                Math.abs(taken),
+                                Math.abs(missed)),
+                        "The plate was loaded in these frames, so all its loads are off by this much",
+                        "Set plateZero to auto, or to frames in which the plate is empty")
+                .proposing(ZERO_BY_ITSELF);
     }
 
     private static Finding noSuchFrames(Optional<FrameRange> range, Signal signal) {
         return new Finding(
-                "plate-zero",
-                Severity.WARNING,
-                signal.where,
-                range.map(stated -> "frames " + stated.first() + " to " + stated.last()
-                                + " are stated for zeroing, the capture has "
-                                + signal.capture.range().first() + " to "
-                                + signal.capture.range().last())
-                        .orElse("the file names no frames in which its plates are unloaded"),
-                "The channels were left as they are, so an offset of the plate is part of its loads",
-                "Set plateZero to auto, or to frames of this capture in which the plate is empty");
+                        "plate-zero",
+                        Severity.WARNING,
+                        signal.where,
+                        range.map(stated -> "frames " + stated.first() + " to " + stated.last()
+                                        + " are stated for zeroing, the capture has "
+                                        + signal.capture.range().first() + " to "
+                                        + signal.capture.range().last())
+                                .orElse("the file names no frames in which its plates are unloaded"),
+                        "The channels were left as they are, so an offset of the plate is part of its loads",
+                        "Set plateZero to auto, or to frames of this capture in which the plate is empty")
+                .proposing(ZERO_BY_ITSELF);
     }
 }

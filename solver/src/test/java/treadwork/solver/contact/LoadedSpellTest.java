@@ -2,6 +2,7 @@ package treadwork.solver.contact;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
@@ -43,13 +44,27 @@ class LoadedSpellTest {
     }
 
     @Test
-    void endsWhereThePushIsNotKnown() {
+    void goesOnAcrossSamplesThatAreNotKnownWhileThePlateIsLoadedOnBothSides() {
         double[] values = block(200).toArray();
-        values[100] = Double.NaN;
+        Arrays.fill(values, 100, 120, Double.NaN);
 
-        assertEquals(
-                List.of(new LoadedSpell(10, 100), new LoadedSpell(101, 210)),
-                LoadedSpell.find(ScalarSeries.of(values), 20, 1000));
+        assertEquals(List.of(new LoadedSpell(10, 210)), LoadedSpell.find(ScalarSeries.of(values), 20, 1000));
+    }
+
+    @Test
+    void endsWhereThePushIsNotKnownAndThePlateIsEmptyAfterwards() {
+        double[] values = block(200).toArray();
+        Arrays.fill(values, 150, 215, Double.NaN);
+
+        assertEquals(List.of(new LoadedSpell(10, 150)), LoadedSpell.find(ScalarSeries.of(values), 20, 1000));
+    }
+
+    @Test
+    void doesNotBeginWhereThePushIsNotKnown() {
+        double[] values = block(200).toArray();
+        Arrays.fill(values, 0, 30, Double.NaN);
+
+        assertEquals(List.of(new LoadedSpell(30, 210)), LoadedSpell.find(ScalarSeries.of(values), 20, 1000));
     }
 
     private static ScalarSeries block(int length) {

@@ -129,7 +129,7 @@ class ZeroingTest {
     /** The centre of pressure that the plate gives is no load: 60 mm stay 60 mm, whatever the empty plate shows. */
     @Test
     void doesNotZeroACentreOfPressure() {
-        List<Double> load = List.of(0.0, 0.0, -700.0, 60.0, -35.0, 0.0);
+        List<Double> load = List.of(5.0, -8.0, -700.0, 60.0, -35.0, 2.0);
         List<ScalarSeries> signals = new ArrayList<>();
         for (int j = 0; j < 6; j++) {
             double loaded = load.get(j);
@@ -154,7 +154,11 @@ class ZeroingTest {
 
         assertEquals(-25, loads.plates().get(0).rawPush().at(EMPTY), ROUNDING, "N");
         assertEquals(675, loads.plates().get(0).rawPush().at(LOADED), ROUNDING, "N");
-        assertEquals(List.of(), codes(loads));
+        assertEquals(List.of("plate-zero"), codes(loads));
+        assertEquals(Severity.WARNING, loads.findings().get(0).severity());
+        assertEquals(
+                "{ \"processing\": { \"plateZero\": \"auto\" } }",
+                loads.findings().get(0).proposal().orElseThrow().json());
     }
 
     /** A plate not zeroed shows 212 N the wrong way for most of the trial; its loads still point up. */
@@ -168,7 +172,7 @@ class ZeroingTest {
         PlateLoads loads = resolve(capture, new PlateZero.None());
 
         assertEquals(500, loads.plates().get(0).rawPush().at(450), ROUNDING, "N");
-        assertEquals(List.of(), codes(loads));
+        assertEquals(List.of("plate-zero"), codes(loads));
     }
 
     @Test
