@@ -34,7 +34,7 @@ public record FootOutline(Side side, VectorSeries heel, VectorSeries fifth, Vect
      * How far {@code point} lies outside the outline, both seen along {@code normal}, m; 0 inside, NaN where the outline is
      * not known. A point is inside when it is on the same side of all four edges.
      */
-    double distance(Vector3 point, int frame, Vector3 normal) {
+    public double distance(Vector3 point, int frame, Vector3 normal) {
         if (!isKnown(frame)) {
             return Double.NaN;
         }

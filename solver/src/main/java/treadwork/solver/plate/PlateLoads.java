@@ -85,11 +85,12 @@ public record PlateLoads(List<PlateLoad> plates, List<Finding> findings) {
         private PlateLoad smoothed(WrenchSeries load, PlateTop top, BitSet unknown) {
             SmoothedWrench smooth = Smoothing.smooth(load, settings.plateFilter(), capture.analogRate());
             int reach = RunEnds.frames(smooth.cutoffHz(), capture.analogRate());
+            double delay = settings.plateDelayS() * capture.analogRate();
             return new PlateLoad(
                     number,
                     top,
-                    blanked(load, unknown, 0),
-                    blanked(smooth.series(), unknown, reach),
+                    ClockDelay.takenOut(blanked(load, unknown, 0), delay),
+                    ClockDelay.takenOut(blanked(smooth.series(), unknown, reach), delay),
                     smooth.cutoffHz());
         }
 
