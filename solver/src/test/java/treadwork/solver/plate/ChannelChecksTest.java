@@ -41,7 +41,14 @@ class ChannelChecksTest {
     void leavesCleanWalksAlone() {
         List<String> accused = new ArrayList<>();
         for (int seed = 0; seed < RecordedWalks.count(); seed++) {
-            for (Capture walk : List.of(RecordedWalks.walk(seed), inWholeSteps(RecordedWalks.walk(seed)))) {
+            List<Capture> clean = List.of(
+                    RecordedWalks.walk(seed),
+                    inWholeSteps(RecordedWalks.walk(seed)),
+                    RecordedWalks.standing(seed),
+                    inWholeSteps(RecordedWalks.standing(seed)),
+                    RecordedWalks.exact(seed),
+                    inWholeSteps(RecordedWalks.exact(seed)));
+            for (Capture walk : clean) {
                 warnings(walk).forEach(finding -> accused.add(finding.line()));
             }
         }
@@ -118,6 +125,15 @@ class ChannelChecksTest {
         assertEquals(Proposal.Scope.STUDY, proposal.scope());
         assertEquals(1, occurrences(proposal.json(), "\"channelUnit\": \"m\""), proposal.json());
         assertEquals(walk.plates().size(), occurrences(proposal.json(), "\"type\": 2"), "plates in it");
+    }
+
+    /** Plate z points down, so what creeps up along it is a reaction that falls. */
+    @Test
+    void saysHowFastAPlateDrifts() {
+        Finding finding = only("plate-drift", PlateFaults.drifting(RecordedWalks.exact(0), PLATE, 5));
+
+        assertTrue(finding.figure().contains("force z (lab axes)"), finding.figure());
+        assertTrue(finding.figure().contains("-5.00 N a second"), finding.figure());
     }
 
     @Test
