@@ -14,6 +14,8 @@ import org.junit.jupiter.params.provider.ValueSource;
 import treadwork.fixtures.fault.PlateFaults;
 import treadwork.fixtures.plate.PlateChannels;
 import treadwork.fixtures.plate.PlateDesign;
+import treadwork.fixtures.rod.ProvedPlate;
+import treadwork.fixtures.rod.WeightsCapture;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
@@ -174,6 +176,25 @@ class ChannelChecksTest {
                         .toList());
     }
 
+    /** A mass has no shear, and channels of coarse steps may keep a level under it. */
+    @Test
+    void doesNotMissShearUnderAMass() {
+        List<WeightsCapture.Mass> masses = List.of(new WeightsCapture.Mass(20, 0.1, 0.05));
+        Capture capture = new WeightsCapture(ProvedPlate.of(PlateType.FORCE_AND_MOMENT), masses, 1, 1).capture();
+        List<AnalogChannel> offset = capture.analog().stream()
+                .map(channel -> new AnalogChannel(
+                        channel.label(),
+                        channel.unit(),
+                        channel.values()
+                                .map(values ->
+                                        Arrays.stream(values).map(v -> v + 3).toArray())))
+                .toList();
+
+        PlateLoads loads = RecordedWalks.resolve(with(capture, offset));
+
+        assertEquals(1, loads.plates().size());
+    }
+
     /** The channel's own samples at its rail tell what must be blank. */
     @Test
     void blanksTheSamplesAtTheRailAndNoOthers() {
@@ -241,8 +262,12 @@ class ChannelChecksTest {
 
     /** As a converter of 11 bits and a sign stores the channels, each over twice its range. */
     private static Capture inWholeSteps(Capture walk) {
-        List<AnalogChannel> analog =
-                walk.analog().stream().map(ChannelChecksTest::inWholeSteps).toList();
+        return with(
+                walk,
+                walk.analog().stream().map(ChannelChecksTest::inWholeSteps).toList());
+    }
+
+    private static Capture with(Capture walk, List<AnalogChannel> analog) {
         return new Capture(
                 walk.name(),
                 walk.firstFrame(),
