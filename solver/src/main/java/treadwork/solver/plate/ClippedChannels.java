@@ -17,6 +17,8 @@ import treadwork.model.finding.Severity;
  * within as many samples beside it, the run is far longer than any run of a value between the extremes under load, and the plate's other
  * channels move meanwhile.
  *
+ * <p>A centre of pressure is left out: it is computed, and some programs hold it at the plate's edge.
+ *
  * @param samples in which a channel is at its rail
  */
 record ClippedChannels(BitSet samples, Optional<Finding> finding) {
@@ -39,7 +41,8 @@ record ClippedChannels(BitSet samples, Optional<Finding> finding) {
         if (Stretch.longest(loaded).length() >= FEWEST) {
             for (int j = 0; j < plate.channels().count(); j++) {
                 for (int end : new int[] {1, -1}) {
-                    Optional<Rail> rail = Rail.of(plate, j, end, loaded);
+                    Optional<Rail> rail =
+                            plate.channels().isPlace(j) ? Optional.empty() : Rail.of(plate, j, end, loaded);
                     rail.ifPresent(found -> clipped.or(found.samples));
                     rail.ifPresent(
                             found -> words.append(words.isEmpty() ? "" : "; ").append(found.words()));

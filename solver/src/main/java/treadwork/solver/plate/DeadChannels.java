@@ -20,6 +20,9 @@ record DeadChannels(boolean unusable, Optional<Finding> finding) {
 
     private static final double MOMENT = 10;
 
+    /** Below this a shear channel of coarse steps may well not move, N. */
+    private static final double SHEAR = 15;
+
     /** As long as a contact has to be, s. */
     private static final double LONG_ENOUGH_S = 0.05;
 
@@ -33,34 +36,43 @@ record DeadChannels(boolean unusable, Optional<Finding> finding) {
         if (flat.isEmpty() || !(loadedFor(plate) >= LONG_ENOUGH_S)) {
             return new DeadChannels(false, Optional.empty());
         }
-        boolean unconnected = flat.stream().allMatch(j -> isUnconnectedShear(plate, j));
-        return new DeadChannels(!unconnected, Optional.of(unconnected ? unconnected(plate, flat) : dead(plate, flat)));
+        boolean idle = flat.stream().allMatch(j -> isIdleShear(plate, j));
+        return new DeadChannels(!idle, Optional.of(idle ? idle(plate, flat) : dead(plate, flat)));
     }
 
     /**
      * Some plates have no shear sensors, some sum theirs into one channel of a pair: what is not connected is stored as zeros.
-     * A vertical channel, or one that shows a level and does not move, is broken.
+     * Or there is no shear to show: a mass was put on the plate. A vertical channel that does not move is broken, and so is a
+     * shear channel that keeps a level while others show shear.
      */
-    private static boolean isUnconnectedShear(MeasuredPlate plate, int j) {
+    private static boolean isIdleShear(MeasuredPlate plate, int j) {
         boolean four = plate.plate().type() == PlateType.FOUR_SENSORS;
         boolean shear = four ? j < 4 : j < 2 || j == plate.channels().count() - 1;
-        return shear && plate.channels().signal(j)[0] == 0;
+        return shear && (plate.channels().signal(j)[0] == 0 || !showsShear(plate));
+    }
+
+    private static boolean showsShear(MeasuredPlate plate) {
+        return Math.max(away(plate, 0, SHEAR), away(plate, 1, SHEAR)) >= LONG_ENOUGH_S;
     }
 
     /** The longest time for which a force or a moment about a level axis is away from its usual value, s. */
     private static double loadedFor(MeasuredPlate plate) {
         double longest = 0;
         for (int row = 0; row < 5; row++) {
-            double[] component = plate.channels().component(plate.matrix(), row);
-            double usual = Medians.of(component);
-            double least = row < 3 ? FORCE : MOMENT;
-            int away = 0;
-            for (double value : component) {
-                away += Math.abs(value - usual) > least ? 1 : 0;
-            }
-            longest = Math.max(longest, away / plate.rate());
+            longest = Math.max(longest, away(plate, row, row < 3 ? FORCE : MOMENT));
         }
         return longest;
+    }
+
+    /** How long a component is away from its usual value by more than {@code least}, s. */
+    private static double away(MeasuredPlate plate, int row, double least) {
+        double[] component = plate.channels().component(plate.matrix(), row);
+        double usual = Medians.of(component);
+        int away = 0;
+        for (double value : component) {
+            away += Math.abs(value - usual) > least ? 1 : 0;
+        }
+        return away / plate.rate();
     }
 
     private static Finding dead(MeasuredPlate plate, List<Integer> flat) {
@@ -74,12 +86,12 @@ record DeadChannels(boolean unusable, Optional<Finding> finding) {
                         + " of the study file");
     }
 
-    private static Finding unconnected(MeasuredPlate plate, List<Integer> flat) {
+    private static Finding idle(MeasuredPlate plate, List<Integer> flat) {
         return new Finding(
                 "plate-dead",
                 Severity.NOTE,
                 plate.where(),
-                figure(plate, flat) + "; it is shear alone, and the value is zero",
+                figure(plate, flat) + "; it is shear alone, and zero, or no shear is shown at all",
                 "These channels seem not to be connected, so joint moments may lack what shear and the free moment add to them",
                 "Nothing, if the plate has no such sensors or sums them in another channel; else check their cables");
     }

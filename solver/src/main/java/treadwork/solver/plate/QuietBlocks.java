@@ -1,6 +1,7 @@
 package treadwork.solver.plate;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.BitSet;
 import java.util.List;
 import treadwork.model.space.ScalarSeries;
@@ -48,7 +49,13 @@ final class QuietBlocks {
         for (int k = 0; k < count; k++) {
             lowest = spreads[k] <= loudest ? Math.min(lowest, means[k]) : lowest;
         }
-        double highest = lowest + SMALL_PART * (Medians.share(values, 1) - lowest);
+        double highest = lowest
+                + SMALL_PART
+                        * (Arrays.stream(values)
+                                        .filter(value -> !Double.isNaN(value))
+                                        .max()
+                                        .orElse(0)
+                                - lowest);
         BitSet quiet = new BitSet();
         for (int k = 0; k < count; k++) {
             quiet.set(k, spreads[k] <= loudest && means[k] <= highest);

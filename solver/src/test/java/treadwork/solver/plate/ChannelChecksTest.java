@@ -14,6 +14,8 @@ import org.junit.jupiter.params.provider.ValueSource;
 import treadwork.fixtures.fault.PlateFaults;
 import treadwork.fixtures.plate.PlateChannels;
 import treadwork.fixtures.plate.PlateDesign;
+import treadwork.fixtures.rod.ProvedPlate;
+import treadwork.fixtures.rod.WeightsCapture;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
@@ -41,7 +43,14 @@ class ChannelChecksTest {
     void leavesCleanWalksAlone() {
         List<String> accused = new ArrayList<>();
         for (int seed = 0; seed < RecordedWalks.count(); seed++) {
-            for (Capture walk : List.of(RecordedWalks.walk(seed), inWholeSteps(RecordedWalks.walk(seed)))) {
+            List<Capture> clean = List.of(
+                    RecordedWalks.walk(seed),
+                    inWholeSteps(RecordedWalks.walk(seed)),
+                    RecordedWalks.standing(seed),
+                    inWholeSteps(RecordedWalks.standing(seed)),
+                    RecordedWalks.exact(seed),
+                    inWholeSteps(RecordedWalks.exact(seed)));
+            for (Capture walk : clean) {
                 warnings(walk).forEach(finding -> accused.add(finding.line()));
             }
         }
@@ -120,6 +129,15 @@ class ChannelChecksTest {
         assertEquals(walk.plates().size(), occurrences(proposal.json(), "\"type\": 2"), "plates in it");
     }
 
+    /** Plate z points down, so what creeps up along it is a reaction that falls. */
+    @Test
+    void saysHowFastAPlateDrifts() {
+        Finding finding = only("plate-drift", PlateFaults.drifting(RecordedWalks.exact(0), PLATE, 5));
+
+        assertTrue(finding.figure().contains("force z (lab axes)"), finding.figure());
+        assertTrue(finding.figure().contains("-5.00 N a second"), finding.figure());
+    }
+
     @Test
     void saysByWhichFactorForcesAreOut() {
         Finding finding = only("unit-mismatch", PlateFaults.forcesScaled(RecordedWalks.walk(0), PLATE, 0.1));
@@ -156,6 +174,25 @@ class ChannelChecksTest {
                         .filter(finding -> finding.code().equals("plate-dead"))
                         .map(Finding::severity)
                         .toList());
+    }
+
+    /** A mass has no shear, and channels of coarse steps may keep a level under it. */
+    @Test
+    void doesNotMissShearUnderAMass() {
+        List<WeightsCapture.Mass> masses = List.of(new WeightsCapture.Mass(20, 0.1, 0.05));
+        Capture capture = new WeightsCapture(ProvedPlate.of(PlateType.FORCE_AND_MOMENT), masses, 1, 1).capture();
+        List<AnalogChannel> offset = capture.analog().stream()
+                .map(channel -> new AnalogChannel(
+                        channel.label(),
+                        channel.unit(),
+                        channel.values()
+                                .map(values ->
+                                        Arrays.stream(values).map(v -> v + 3).toArray())))
+                .toList();
+
+        PlateLoads loads = RecordedWalks.resolve(with(capture, offset));
+
+        assertEquals(1, loads.plates().size());
     }
 
     /** The channel's own samples at its rail tell what must be blank. */
@@ -225,8 +262,12 @@ class ChannelChecksTest {
 
     /** As a converter of 11 bits and a sign stores the channels, each over twice its range. */
     private static Capture inWholeSteps(Capture walk) {
-        List<AnalogChannel> analog =
-                walk.analog().stream().map(ChannelChecksTest::inWholeSteps).toList();
+        return with(
+                walk,
+                walk.analog().stream().map(ChannelChecksTest::inWholeSteps).toList());
+    }
+
+    private static Capture with(Capture walk, List<AnalogChannel> analog) {
         return new Capture(
                 walk.name(),
                 walk.firstFrame(),

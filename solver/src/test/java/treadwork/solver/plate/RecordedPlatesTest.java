@@ -171,6 +171,40 @@ class RecordedPlatesTest {
         return best;
     }
 
+    /**
+     * What the checks of the channels find in open recordings. Seen by eye: the three plates of one file hold zeros in two of
+     * their shear channels; in another, level force x of plate 2 is 4 N before its one contact of 230 N and -3 N after it.
+     */
+    @ParameterizedTest
+    @CsvSource({
+        "walk-static-a/Walking_Hybrid_1_1.c3d, ''",
+        "walk-static-a/Walking_Hybrid_1_3.c3d, ''",
+        "walk-static-a/Walking_Hybrid_1_5.c3d, ''",
+        "walk-static-d/type1.C3D, ''",
+        "walk-static-d/standing.C3D, ''",
+        "jump-c/Sample_Jump2.c3d, ''",
+        "c3d-plate-types/TYPE-2.C3D, ''",
+        "c3d-plate-types/TYPE-3.c3d, ''",
+        "c3d-plate-types/TYPE-4.C3D, ''",
+        "c3d-plate-types/walk_wands_type3.c3d, ''",
+        "c3d-encodings/pc_int.c3d, ''",
+        "c3d-encodings/sgi_real.c3d, ''",
+        "c3d-odd-files/prefixed_labels.c3d, ''",
+        "c3d-odd-files/bad_parameter_section.c3d, plate-drift",
+        "c3d-odd-files/three_plates_used_mismatch.c3d, plate-dead plate-dead plate-dead"
+    })
+    void areAccusedOfWhatIsTrueAlone(String file, String codes) {
+        Capture capture = Recordings.read(file, Optional.of(LengthUnit.MM));
+        List<String> checks = List.of("plate-dead", "plate-clipped", "plate-noise", "plate-drift", "unit-mismatch");
+
+        PlateLoads loads =
+                PlateLoads.resolve(capture, capture.plates(), up(capture).orElseThrow(), Processing.DEFAULT);
+
+        assertEquals(
+                codes,
+                String.join(" ", codes(loads).stream().filter(checks::contains).toList()));
+    }
+
     private static List<String> codes(PlateLoads loads) {
         return loads.findings().stream().map(Finding::code).toList();
     }

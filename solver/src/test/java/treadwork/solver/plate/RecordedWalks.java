@@ -32,6 +32,19 @@ final class RecordedWalks {
     }
 
     static Capture walk(int seed) {
+        return Walk.recording(settings(seed)).walking();
+    }
+
+    static Capture standing(int seed) {
+        return Walk.standing(settings(seed));
+    }
+
+    /** Without noise and without levels. */
+    static Capture exact(int seed) {
+        return Walk.recording(settings(seed).with(Disturbance.NONE)).walking();
+    }
+
+    private static WalkerSettings settings(int seed) {
         Random random = new Random(seed);
         Figure figure = Figure.DEFAULT
                 .withMassKg(52 + 45 * random.nextDouble())
@@ -52,12 +65,7 @@ final class RecordedWalks {
                 .withPlateNoise(1)
                 .withPlateBaseline(5)
                 .withSeed(seed);
-        return Walk.recording(WalkerSettings.DEFAULT
-                        .with(figure)
-                        .with(gait)
-                        .with(plates)
-                        .with(disturbance))
-                .walking();
+        return WalkerSettings.DEFAULT.with(figure).with(gait).with(plates).with(disturbance);
     }
 
     static PlateLoads resolve(Capture capture) {
