@@ -44,6 +44,24 @@ public record Capture(
         findings = List.copyOf(findings);
     }
 
+    /** The same with other points. */
+    public Capture withPoints(List<PointSeries> other) {
+        return new Capture(
+                name,
+                firstFrame,
+                frames,
+                pointRate,
+                other,
+                samplesPerFrame,
+                analog,
+                plates,
+                plateZero,
+                events,
+                pointUnit,
+                storage,
+                findings);
+    }
+
     /** Analog samples a second, Hz; 0 without analog data. */
     public double analogRate() {
         return pointRate * samplesPerFrame;

@@ -37,7 +37,8 @@ record FootMatch(double distance, double progress) {
         int frames = scene.capture().frames();
         double peak = 0;
         for (int i = 0; i < frames; i++) {
-            peak = Math.max(peak, push(plate, scene.sample(i)));
+            double push = push(plate, scene.sample(i));
+            peak = push > peak ? push : peak;
         }
         double least = Math.max(LEAST_N, LEAST_SHARE * peak);
         double best = Double.NaN;

@@ -25,6 +25,7 @@ import treadwork.solver.anthropometry.WeighedSegment;
 import treadwork.solver.contact.ContactSettings;
 import treadwork.solver.contact.Contacts;
 import treadwork.solver.contact.FootOutline;
+import treadwork.solver.marker.Exchanges;
 import treadwork.solver.plate.LabUp;
 import treadwork.solver.plate.PlateLoads;
 import treadwork.solver.pose.FootPoints;
@@ -54,7 +55,7 @@ record Measured(
     /** @throws UnusableInputException where the captures or the settings do not allow it; the finding says why */
     static Measured of(TrialInput input) {
         Trial trial = input.trial();
-        Capture movement = input.movement();
+        Capture movement = Exchanges.applied(input.movement(), trial.exchanged());
         List<Plate> described = trial.lab().plates().orElse(movement.plates());
         LabUp lab = LabUp.find(movement, described, trial.lab().up());
         LabAxis up = lab.axis().orElseThrow(() -> new UnusableInputException(last(lab.findings())));
@@ -79,24 +80,24 @@ record Measured(
                         tracked.findings(),
                         plates.findings(),
                         contacts.findings())));
-        return unchecked.with(Agreement.check(unchecked.scene(input, described, feet)));
+        return unchecked.with(Agreement.check(unchecked.scene(input, movement, described, feet)));
     }
 
     private Measured with(List<Finding> more) {
         return new Measured(up, body, tracked, plates, contacts, masses, together(List.of(findings, more)));
     }
 
-    private Scene scene(TrialInput input, List<Plate> described, List<FootOutline> feet) {
+    private Scene scene(TrialInput input, Capture movement, List<Plate> described, List<FootOutline> feet) {
         Trial trial = input.trial();
         double worn = trial.orthoses().stream().mapToDouble(Orthosis::massKg).sum();
         Map<Segment, MassProperties> legs = new EnumMap<>(Segment.class);
         masses.forEach((segment, weighed) -> legs.put(segment, weighed.mass()));
         return new Scene(
-                input.movement(),
+                movement,
                 up.direction(),
                 described,
                 plates,
-                otherwise -> PlateLoads.resolve(input.movement(), otherwise, up, trial.processing()),
+                otherwise -> PlateLoads.resolve(movement, otherwise, up, trial.processing()),
                 contacts,
                 feet,
                 body,

@@ -20,6 +20,8 @@ import treadwork.solver.filter.FilledGap;
 import treadwork.solver.filter.RunEnds;
 import treadwork.solver.filter.Smoothed;
 import treadwork.solver.filter.Smoothing;
+import treadwork.solver.marker.MarkerCluster;
+import treadwork.solver.marker.MarkerScreen;
 import treadwork.solver.pose.MarkerCourses;
 import treadwork.solver.pose.SegmentGeometry;
 import treadwork.solver.pose.SegmentMotion;
@@ -44,9 +46,11 @@ record TrackedBody(Map<Segment, SegmentMotion> motions, Map<Segment, Integer> en
         Map<Segment, SegmentMotion> motions = new EnumMap<>(Segment.class);
         Map<Segment, Integer> endFrames = new EnumMap<>(Segment.class);
         List<Finding> findings = new ArrayList<>();
+        MarkerScreen screen = screened(movement, trial, body);
+        findings.addAll(screen.findings());
         for (SegmentGeometry geometry : body.segments().values()) {
             Segment segment = geometry.segment();
-            FilledCluster filled = filled(movement, trial, segment);
+            FilledCluster filled = filled(screen.courses().get(segment), trial, movement);
             report(filled, movement, segment, trial.markerSet().clusters().get(segment), findings);
             List<Smoothed> smoothed = filled.markers().stream()
                     .map(marker -> Smoothing.smooth(marker, trial.processing().markerFilter(), movement.pointRate()))
@@ -59,10 +63,21 @@ record TrackedBody(Map<Segment, SegmentMotion> motions, Map<Segment, Integer> en
         return new TrackedBody(motions, endFrames, findings);
     }
 
-    private static FilledCluster filled(Capture movement, Trial trial, Segment segment) {
-        List<VectorSeries> markers = trial.markerSet().clusters().get(segment).stream()
-                .map(label -> MarkerCourses.find(movement, label, "cluster " + segment.key()))
-                .toList();
+    private static MarkerScreen screened(Capture movement, Trial trial, StandingBody body) {
+        List<MarkerCluster> clusters = new ArrayList<>();
+        for (SegmentGeometry geometry : body.segments().values()) {
+            Segment segment = geometry.segment();
+            List<String> labels = trial.markerSet().clusters().get(segment);
+            List<VectorSeries> courses = labels.stream()
+                    .map(label -> MarkerCourses.find(movement, label, "cluster " + segment.key()))
+                    .toList();
+            clusters.add(new MarkerCluster(segment, labels, geometry.cluster(), courses));
+        }
+        return MarkerScreen.of(
+                clusters, new MarkerScreen.Recording(movement.name(), movement.firstFrame(), movement.pointRate()));
+    }
+
+    private static FilledCluster filled(List<VectorSeries> markers, Trial trial, Capture movement) {
         long longestGap = Math.round(trial.processing().longestGapS() * movement.pointRate());
         return ClusterFilling.fill(markers, (int) Math.min(longestGap, movement.frames()));
     }
