@@ -27,6 +27,7 @@ final class SettingsTree {
     static Map<String, Object> trial(Trial trial) {
         Map<String, Object> tree = new LinkedHashMap<>();
         tree.put("file", trial.file());
+        tree.put("plateFile", trial.plateFile().orElse(null));
         tree.put("condition", trial.condition().isEmpty() ? null : trial.condition());
         return tree;
     }

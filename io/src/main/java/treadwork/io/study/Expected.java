@@ -10,17 +10,19 @@ import java.util.Map;
 final class Expected {
 
     /** How the keys of the study file carry their units. */
-    private static final Map<String, String> UNITS = Map.of(
-            "massKg", "kg",
-            "cutoffHz", "Hz",
-            "longestGapS", "s",
-            "plateDelayS", "s",
-            "contactThresholdN", "N",
-            "heightM", "m",
-            "comM", "m",
-            "cornersM", "m",
-            "originM", "m",
-            "inertiaKgm2", "kg·m²");
+    private static final Map<String, String> UNITS = Map.ofEntries(
+            Map.entry("massKg", "kg"),
+            Map.entry("cutoffHz", "Hz"),
+            Map.entry("longestGapS", "s"),
+            Map.entry("plateDelayS", "s"),
+            Map.entry("contactThresholdN", "N"),
+            Map.entry("heightM", "m"),
+            Map.entry("comM", "m"),
+            Map.entry("cornersM", "m"),
+            Map.entry("originM", "m"),
+            Map.entry("inertiaKgm2", "kg·m²"),
+            Map.entry("pointRateHz", "Hz"),
+            Map.entry("plateRateHz", "Hz"));
 
     /** A bound that no one comes near is not worth a word. */
     private static final double FAR = 1e9;

@@ -35,6 +35,7 @@ import treadwork.model.study.PoseMethod;
 import treadwork.model.study.Processing;
 import treadwork.model.study.ResultSettings;
 import treadwork.model.study.ShankAxis;
+import treadwork.model.study.TextSettings;
 
 /** Settings from JSON that the schema has passed; a key that does not stand has its default. */
 final class SettingsReader {
@@ -47,7 +48,18 @@ final class SettingsReader {
                 LengthUnit.ofSymbol(lab.path("pointUnit").asText()),
                 lab.path("plates").isArray()
                         ? Optional.of(each(lab.get("plates"), SettingsReader::plate))
-                        : Optional.empty());
+                        : Optional.empty(),
+                text(lab.path("text")));
+    }
+
+    private static TextSettings text(JsonNode text) {
+        List<String> channels = new ArrayList<>();
+        text.path("channels").forEach(name -> channels.add(name.asText().strip()));
+        return new TextSettings(hertz(text.path("pointRateHz")), hertz(text.path("plateRateHz")), channels);
+    }
+
+    private static Optional<Double> hertz(JsonNode rate) {
+        return rate.isNumber() ? Optional.of(rate.asDouble()) : Optional.empty();
     }
 
     static BodySettings body(JsonNode body) {

@@ -111,7 +111,8 @@ final class StudyResolver {
                 SettingsReader.contacts(node.path("contacts")),
                 SettingsReader.frames(node.path("frames")),
                 worn,
-                SettingsReader.exchanged(node.path("exchanged")));
+                SettingsReader.exchanged(node.path("exchanged")),
+                node.has("plateFile") ? Optional.of(existing(pointer + "/plateFile")) : Optional.empty());
     }
 
     private MarkerSet trialMarkers(String pointer, MarkerSource standing) {

@@ -26,6 +26,7 @@ import treadwork.model.study.Orthosis;
 import treadwork.model.study.PlateZero;
 import treadwork.model.study.Processing;
 import treadwork.model.study.ResultSettings;
+import treadwork.model.study.TextSettings;
 
 /**
  * Settings as they stand in a study file, every default written out, keys in the order of the schema: maps, lists, texts
@@ -46,6 +47,15 @@ public final class StudyTree {
                 lab.plates()
                         .<Object>map(plates -> each(plates, StudyTree::plate))
                         .orElse("file"));
+        tree.put("text", text(lab.text()));
+        return tree;
+    }
+
+    private static Map<String, Object> text(TextSettings text) {
+        Map<String, Object> tree = new LinkedHashMap<>();
+        tree.put("pointRateHz", text.pointRateHz().<Object>map(JsonText::number).orElse(AUTO));
+        tree.put("plateRateHz", text.plateRateHz().<Object>map(JsonText::number).orElse(AUTO));
+        tree.put("channels", text.channels());
         return tree;
     }
 

@@ -109,6 +109,7 @@ public final class StudyWriter {
     private Map<String, Object> trial(Trial trial, Subject subject) {
         Map<String, Object> tree = new LinkedHashMap<>();
         tree.put("file", trial.file());
+        trial.plateFile().ifPresent(plates -> tree.put("plateFile", plates));
         if (!trial.condition().isEmpty()) {
             tree.put("condition", trial.condition());
         }

@@ -130,7 +130,7 @@ class StudySchemaTest {
             }
         });
 
-        assertEquals(10, units.size(), units.toString());
+        assertEquals(12, units.size(), units.toString());
         assertFalse(units.containsValue(""), units.toString());
     }
 

@@ -9,12 +9,19 @@ import treadwork.model.capture.Plate;
  * @param up        empty: found from plates and markers
  * @param pointUnit empty: the file's own
  * @param plates    empty: those of the file; else these replace them
+ * @param text      what holds for captures that are delimited text
  */
-public record LabSettings(Optional<LabAxis> up, Optional<LengthUnit> pointUnit, Optional<List<Plate>> plates) {
+public record LabSettings(
+        Optional<LabAxis> up, Optional<LengthUnit> pointUnit, Optional<List<Plate>> plates, TextSettings text) {
 
     public static final LabSettings DEFAULT = new LabSettings(Optional.empty(), Optional.empty(), Optional.empty());
 
     public LabSettings {
         plates = plates.map(List::copyOf);
+    }
+
+    /** With text captures that say all of themselves. */
+    public LabSettings(Optional<LabAxis> up, Optional<LengthUnit> pointUnit, Optional<List<Plate>> plates) {
+        this(up, pointUnit, plates, TextSettings.DEFAULT);
     }
 }

@@ -14,6 +14,7 @@ import treadwork.model.capture.FrameRange;
  * @param frames    empty: all
  * @param orthoses  those of this trial's condition
  * @param exchanged labels that the capture has the wrong way round, put right before anything else
+ * @param plateFile path of the plates' own file, relative to the study file, of text captures alone
  */
 public record Trial(
         String file,
@@ -26,12 +27,41 @@ public record Trial(
         Optional<List<ContactRule>> contacts,
         Optional<FrameRange> frames,
         List<Orthosis> orthoses,
-        List<Exchange> exchanged) {
+        List<Exchange> exchanged,
+        Optional<String> plateFile) {
 
     public Trial {
         contacts = contacts.map(List::copyOf);
         orthoses = List.copyOf(orthoses);
         exchanged = List.copyOf(exchanged);
+    }
+
+    /** With the plates in the capture's file. */
+    public Trial(
+            String file,
+            String condition,
+            MarkerSet markerSet,
+            LabSettings lab,
+            BodySettings body,
+            Processing processing,
+            ResultSettings results,
+            Optional<List<ContactRule>> contacts,
+            Optional<FrameRange> frames,
+            List<Orthosis> orthoses,
+            List<Exchange> exchanged) {
+        this(
+                file,
+                condition,
+                markerSet,
+                lab,
+                body,
+                processing,
+                results,
+                contacts,
+                frames,
+                orthoses,
+                exchanged,
+                Optional.empty());
     }
 
     /** With every label on its own marker. */

@@ -11,11 +11,14 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
-import treadwork.io.c3d.C3dReader;
+import treadwork.io.c3d.ReadOptions;
+import treadwork.io.capture.CaptureFiles;
 import treadwork.io.file.JsonText;
+import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
+import treadwork.model.study.TextSettings;
 import treadwork.solver.run.Inspection;
 
 /** {@code treadwork inspect}: what is in capture files, and what is wrong with them. */
@@ -25,7 +28,7 @@ import treadwork.solver.run.Inspection;
         mixinStandardHelpOptions = true)
 final class InspectCommand implements Callable<Integer> {
 
-    @Parameters(arity = "1..*", paramLabel = "FILE", description = "Capture files (C3D).")
+    @Parameters(arity = "1..*", paramLabel = "FILE", description = "Capture files (C3D, or delimited text).")
     List<Path> files;
 
     @Option(names = "--json", description = "Print one JSON document.")
@@ -46,7 +49,7 @@ final class InspectCommand implements Callable<Integer> {
         Map<Path, Finding> unusable = new LinkedHashMap<>();
         for (Path file : files) {
             try {
-                inspected.put(file, Inspection.of(C3dReader.read(file, Optional.ofNullable(unit))));
+                inspected.put(file, Inspection.of(read(file)));
             } catch (UnusableInputException refused) {
                 unusable.put(file, refused.finding());
             }
@@ -56,6 +59,11 @@ final class InspectCommand implements Callable<Integer> {
             return ExitCode.DONE;
         }
         return inspected.isEmpty() ? ExitCode.UNUSABLE : ExitCode.PARTLY;
+    }
+
+    private Capture read(Path file) {
+        ReadOptions options = new ReadOptions(Optional.ofNullable(unit), true);
+        return CaptureFiles.read(file, Optional.empty(), options, TextSettings.DEFAULT);
     }
 
     private void print(Map<Path, Inspection> inspected, Map<Path, Finding> unusable) {

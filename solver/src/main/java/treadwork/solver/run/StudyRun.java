@@ -9,8 +9,8 @@ import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.function.Consumer;
-import treadwork.io.c3d.C3dReader;
 import treadwork.io.c3d.ReadOptions;
+import treadwork.io.capture.CaptureFiles;
 import treadwork.io.inertia.InertiaTables;
 import treadwork.io.result.InputFile;
 import treadwork.io.result.TrialFiles;
@@ -126,11 +126,7 @@ public final class StudyRun {
     private TrialOutcome outcome(Job job, Path folder) {
         Trial trial = job.trial();
         StandingCaptures.Standing stood = standing.of(job.subject(), trial);
-        TrialRecord record = new TrialRecord(
-                ProgramVersion.TEXT,
-                job.subject(),
-                trial,
-                List.of(stood.input(), InputFile.of(trial.file(), document.pathOf(trial.file()))));
+        TrialRecord record = new TrialRecord(ProgramVersion.TEXT, job.subject(), trial, inputs(stood, trial));
         if (!settings.again() && TrialFiles.isUpToDate(folder, record.key())) {
             return new TrialOutcome(
                     job.name(), trial.condition(), TrialOutcome.Status.UP_TO_DATE, folder, Optional.empty(), List.of());
@@ -151,9 +147,21 @@ public final class StudyRun {
                 computed.result().findings());
     }
 
+    private List<InputFile> inputs(StandingCaptures.Standing stood, Trial trial) {
+        List<InputFile> inputs = new ArrayList<>();
+        inputs.add(stood.input());
+        inputs.add(InputFile.of(trial.file(), document.pathOf(trial.file())));
+        trial.plateFile().ifPresent(plates -> inputs.add(InputFile.of(plates, document.pathOf(plates))));
+        return inputs;
+    }
+
     private Capture movement(Trial trial) {
         ReadOptions options =
                 new ReadOptions(trial.lab().pointUnit(), trial.lab().plates().isEmpty());
-        return C3dReader.read(document.pathOf(trial.file()), options);
+        return CaptureFiles.read(
+                document.pathOf(trial.file()),
+                trial.plateFile().map(document::pathOf),
+                options,
+                trial.lab().text());
     }
 }
