@@ -15,9 +15,12 @@ record LoadedSpell(int from, int end) {
     /** No foot stands for less; what is shorter is a knock, s. */
     static final double SHORTEST_S = 0.05;
 
+    /** Unless the record begins or ends in it, s. */
+    private static final double SHORTEST_CUT_S = 0.01;
+
     /**
      * The spells that begin when the push reaches {@code threshold}, end when it falls below half of it, and last at least 50
-     * ms (the lower second level keeps noise from ending a contact). Where the push is not known a spell goes on if the plate
+     * ms, or 10 ms where the record cuts them off (the lower second level keeps noise from ending a contact). Where the push is not known a spell goes on if the plate
      * is loaded right after it, too; else it ends there.
      */
     static List<LoadedSpell> find(ScalarSeries push, double threshold, double rate) {
@@ -29,7 +32,8 @@ record LoadedSpell(int from, int end) {
             if (on && from < 0) {
                 from = i;
             } else if (!on && from >= 0) {
-                if (i - from >= SHORTEST_S * rate - 1e-9) {
+                boolean cut = from == 0 || i == push.size();
+                if (i - from >= (cut ? SHORTEST_CUT_S : SHORTEST_S) * rate - 1e-9) {
                     spells.add(new LoadedSpell(from, i));
                 }
                 from = -1;

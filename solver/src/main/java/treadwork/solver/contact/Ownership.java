@@ -48,7 +48,11 @@ record Ownership(List<OwnedSpell> owned, BitSet shared, List<Finding> findings, 
         Clock clock = finder.clock();
         BitSet alone = spell.frames(clock);
         alone.andNot(shared);
-        for (FrameRange run : FrameRuns.of(FrameRuns.atLeast(alone, clock.framesIn(LoadedSpell.SHORTEST_S)))) {
+        for (FrameRange run : FrameRuns.of(alone)) {
+            boolean cut = run.first() == 0 || run.last() == clock.frames() - 1;
+            if (!cut && run.count() < clock.framesIn(LoadedSpell.SHORTEST_S)) {
+                continue;
+            }
             BitSet frames = new BitSet();
             frames.set(run.first(), run.last() + 1);
             Attribution attribution = Attribution.of(frames, spell.plate, feet, finder);

@@ -11,8 +11,7 @@ import treadwork.model.space.VectorSeries;
 /**
  * {@code marker-noise}, throughout: a marker that jitters more than its peers.
  *
- * <p>Measured by fourth differences, which movement hardly reaches: of white noise they have √70 times its standard deviation.
- * The median of their sizes over 0.6745 is that deviation, whatever a few frames do.
+ * <p>Measured by the median length of {@link FourthDifferences}, whatever a few frames do.
  */
 final class JitterCheck {
 
@@ -23,6 +22,9 @@ final class JitterCheck {
     private static final double TIMES = 3;
 
     private static final int FEWEST = 20;
+
+    /** Of the length of three independent normal numbers of standard deviation 1: √2.366, the median of χ² with three. */
+    private static final double MEDIAN = 1.538;
 
     private JitterCheck() {}
 
@@ -54,27 +56,12 @@ final class JitterCheck {
         return findings;
     }
 
+    /** Of one component, m; NaN where too little is known. */
     private static double jitter(VectorSeries course) {
-        double[] sizes = new double[3 * course.size()];
-        int count = 0;
-        for (int i = 2; i < course.size() - 2; i++) {
-            double x = difference(course.x(i - 2), course.x(i - 1), course.x(i), course.x(i + 1), course.x(i + 2));
-            double y = difference(course.y(i - 2), course.y(i - 1), course.y(i), course.y(i + 1), course.y(i + 2));
-            double z = difference(course.z(i - 2), course.z(i - 1), course.z(i), course.z(i + 1), course.z(i + 2));
-            if (!Double.isNaN(x + y + z)) {
-                sizes[count++] = Math.abs(x);
-                sizes[count++] = Math.abs(y);
-                sizes[count++] = Math.abs(z);
-            }
-        }
-        if (count < FEWEST) {
-            return Double.NaN;
-        }
-        Arrays.sort(sizes, 0, count);
-        return sizes[count / 2] / 0.6745 / Math.sqrt(70);
-    }
-
-    private static double difference(double a, double b, double c, double d, double e) {
-        return a - 4 * b + 6 * c - 4 * d + e;
+        double[] sizes = Arrays.stream(FourthDifferences.sizes(course))
+                .filter(size -> !Double.isNaN(size))
+                .sorted()
+                .toArray();
+        return sizes.length < FEWEST ? Double.NaN : sizes[sizes.length / 2] / MEDIAN / Math.sqrt(70);
     }
 }

@@ -1,6 +1,5 @@
 package treadwork.solver.marker;
 
-import java.util.Arrays;
 import java.util.BitSet;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -11,61 +10,59 @@ import treadwork.model.finding.Severity;
 import treadwork.solver.marker.MarkerScreen.MarkerPlace;
 
 /**
- * {@code marker-noise}, single frames: a marker jumps away from its cluster and is back at once. Seen in its distances from
- * the others, which the cluster's own motion does not change.
+ * {@code marker-noise}, single frames: a marker jumps away and is back at once, while its cluster goes on smoothly.
+ *
+ * <p>Seen in fourth differences: a jump by d in one frame makes them 6 d there and 4 d beside it; the movement that a cluster
+ * shares hardly reaches them, and is told by the other markers.
  */
 final class SpikeSearch {
 
-    /** From the median of five frames, m: skin does not move so in a hundredth of a second. */
-    static final double LIMIT = 0.015;
+    /** A jump by less is left to the filter, m. */
+    static final double LIMIT = 0.012;
 
-    private static final int WINDOW = 5;
+    /** Of a jump's size, its fourth difference. */
+    private static final double GAIN = 6;
+
+    /** A jump is this many times what the other markers of the cluster do in the same frame. */
+    private static final double TIMES = 4;
 
     private SpikeSearch() {}
 
     /** The frames in which each marker that jumps does so; a finding for each. */
     static Map<MarkerPlace, BitSet> in(MarkerCluster cluster, MarkerScreen.Recording record, List<Finding> findings) {
-        int n = cluster.size();
-        int frames = cluster.frames();
-        int[][] jumps = new int[n][frames];
-        for (int one = 0; one < n; one++) {
-            for (int other = one + 1; other < n; other++) {
-                BitSet jumped = jumps(cluster, one, other);
-                for (int i = jumped.nextSetBit(0); i >= 0; i = jumped.nextSetBit(i + 1)) {
-                    jumps[one][i]++;
-                    jumps[other][i]++;
-                }
-            }
+        double[][] sizes = new double[cluster.size()][];
+        for (int marker = 0; marker < sizes.length; marker++) {
+            sizes[marker] = FourthDifferences.sizes(cluster.courses().get(marker));
         }
         Map<MarkerPlace, BitSet> spikes = new LinkedHashMap<>();
-        for (int marker = 0; marker < n; marker++) {
-            BitSet frame = new BitSet();
-            for (int i = 0; i < frames; i++) {
-                // The one that jumped does so from two others at least; each of those only from it.
-                frame.set(i, jumps[marker][i] >= 2);
+        for (int marker = 0; marker < sizes.length; marker++) {
+            BitSet frames = new BitSet();
+            for (int i = 0; i < sizes[marker].length; i++) {
+                frames.set(i, isSpike(sizes, marker, i));
             }
-            if (!frame.isEmpty()) {
-                spikes.put(new MarkerPlace(cluster, marker), frame);
-                findings.add(finding(cluster, marker, frame, record));
+            if (!frames.isEmpty()) {
+                spikes.put(new MarkerPlace(cluster, marker), frames);
+                findings.add(finding(cluster, marker, frames, record));
             }
         }
         return spikes;
     }
 
-    private static BitSet jumps(MarkerCluster cluster, int one, int other) {
-        BitSet jumped = new BitSet();
-        double[] window = new double[WINDOW];
-        for (int i = WINDOW / 2; i < cluster.frames() - WINDOW / 2; i++) {
-            for (int k = 0; k < WINDOW; k++) {
-                window[k] = cluster.distance(one, other, i + k - WINDOW / 2);
-            }
-            double here = window[WINDOW / 2];
-            if (Math.abs(here - window[0]) > LIMIT || Math.abs(here - window[WINDOW - 1]) > LIMIT) {
-                Arrays.sort(window);
-                jumped.set(i, Math.abs(here - window[WINDOW / 2]) > LIMIT);
+    private static boolean isSpike(double[][] sizes, int marker, int frame) {
+        double here = sizes[marker][frame];
+        if (!(here > GAIN * LIMIT)) {
+            return false;
+        }
+        for (int i = Math.max(0, frame - 2); i <= Math.min(sizes[marker].length - 1, frame + 2); i++) {
+            if (sizes[marker][i] > here) {
+                return false;
             }
         }
-        return jumped;
+        double others = 0;
+        for (int other = 0; other < sizes.length; other++) {
+            others = other != marker && sizes[other][frame] > others ? sizes[other][frame] : others;
+        }
+        return here > TIMES * others;
     }
 
     private static Finding finding(MarkerCluster cluster, int marker, BitSet frames, MarkerScreen.Recording record) {
@@ -75,7 +72,7 @@ final class SpikeSearch {
                 record.where(cluster, marker) + ", " + Frames.inWords(Frames.runs(frames, record.firstFrame())),
                 String.format(
                         Locale.ROOT,
-                        "it jumps by more than %.0f mm against its cluster in %d frames and is back at once",
+                        "it jumps by more than %.0f mm in %d frames and is back at once, its cluster does not",
                         1e3 * LIMIT,
                         frames.cardinality()),
                 "A filter would spread each jump over its neighbours, so the marker is taken as missing there",
