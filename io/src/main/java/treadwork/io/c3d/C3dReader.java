@@ -16,8 +16,6 @@ import treadwork.model.capture.LengthUnit;
 import treadwork.model.capture.Plate;
 import treadwork.model.capture.PointSeries;
 import treadwork.model.finding.UnusableInputException;
-import treadwork.model.space.ScalarSeries;
-import treadwork.model.space.VectorSeries;
 
 /**
  * Reads capture files in the C3D format: three processor families, integers and reals, and the oddities of real files.
@@ -100,21 +98,20 @@ public final class C3dReader {
         AnalogScaling scaling = AnalogScaling.of(parameters, layout.analog().channels(), reading);
         List<Plate> plates =
                 options.filePlates() ? new PlateReader(parameters, layout.analog(), unit, reading).read() : List.of();
-        PointCourses points = new PointCourses(layout, scale(parameters) * unit.metres());
-        AnalogCourses analog = new AnalogCourses(layout, scaling);
-        SampleReader.read(bytes, layout, points, analog);
+        double metres = scale(parameters) * unit.metres();
+        Frames frames = FrameReader.read(bytes, layout, reading);
         List<CaptureEvent> events = EventReader.read(opening, firstBlock, span, rate, reading);
         String storage = layout.storage() + (scaling.unsigned() ? ", unsigned analog" : "");
-        List<PointSeries> pointSeries = points(points.finish(span.count(), reading));
+        List<PointSeries> points = points(frames, metres);
         Optional<FrameRange> zero = plateZero(parameters);
         return new Capture(
                 reading.file(),
                 span.first(),
                 span.count(),
                 rate,
-                pointSeries,
+                points,
                 layout.analog().samples(),
-                channels(analog.finish()),
+                channels(frames, scaling),
                 plates,
                 zero,
                 events,
@@ -123,23 +120,25 @@ public final class C3dReader {
                 reading.findings());
     }
 
-    private List<PointSeries> points(List<VectorSeries> positions) {
+    private List<PointSeries> points(Frames frames, double metres) {
+        int count = layout.points();
         Parameters parameters = opening.parameters();
-        List<String> labels = Labels.withoutSubject(Labels.of(parameters, "POINT:LABELS", positions.size()));
-        List<String> descriptions = Labels.of(parameters, "POINT:DESCRIPTIONS", positions.size());
-        List<PointSeries> points = new ArrayList<>(positions.size());
-        for (int i = 0; i < positions.size(); i++) {
-            points.add(new PointSeries(labels.get(i), descriptions.get(i), positions.get(i)));
+        List<String> labels = Labels.withoutSubject(Labels.of(parameters, "POINT:LABELS", count));
+        List<String> descriptions = Labels.of(parameters, "POINT:DESCRIPTIONS", count);
+        List<PointSeries> points = new ArrayList<>(count);
+        for (int i = 0; i < count; i++) {
+            points.add(new PointSeries(labels.get(i), descriptions.get(i), frames.positions(i, metres)));
         }
         return points;
     }
 
-    private List<AnalogChannel> channels(List<ScalarSeries> values) {
-        List<String> labels = Labels.of(opening.parameters(), "ANALOG:LABELS", values.size());
-        List<String> units = Labels.of(opening.parameters(), "ANALOG:UNITS", values.size());
-        List<AnalogChannel> channels = new ArrayList<>(values.size());
-        for (int i = 0; i < values.size(); i++) {
-            channels.add(new AnalogChannel(labels.get(i), units.get(i), values.get(i)));
+    private List<AnalogChannel> channels(Frames frames, AnalogScaling scaling) {
+        int count = layout.analog().channels();
+        List<String> labels = Labels.of(opening.parameters(), "ANALOG:LABELS", count);
+        List<String> units = Labels.of(opening.parameters(), "ANALOG:UNITS", count);
+        List<AnalogChannel> channels = new ArrayList<>(count);
+        for (int i = 0; i < count; i++) {
+            channels.add(new AnalogChannel(labels.get(i), units.get(i), frames.channel(i, scaling)));
         }
         return channels;
     }
