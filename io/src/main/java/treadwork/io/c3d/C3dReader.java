@@ -8,6 +8,7 @@ import java.nio.file.StandardOpenOption;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.CaptureEvent;
@@ -120,16 +121,29 @@ public final class C3dReader {
                 reading.findings());
     }
 
+    /** Those that were measured: what this program computed and wrote beside them are no markers. */
     private List<PointSeries> points(Frames frames, double metres) {
-        int count = layout.points();
         Parameters parameters = opening.parameters();
+        int count = layout.points();
         List<String> labels = Labels.withoutSubject(Labels.of(parameters, "POINT:LABELS", count));
+        List<String> subjects = Labels.subjects(labels);
+        if (subjects.size() > 1) {
+            reading.note(Notices.subjects(reading.file(), subjects));
+        }
         List<String> descriptions = Labels.of(parameters, "POINT:DESCRIPTIONS", count);
+        Set<String> computed =
+                Set.copyOf(parameters.texts(ComputedPoints.GROUP + ":" + ComputedPoints.LABELS, layout.points()));
         List<PointSeries> points = new ArrayList<>(count);
         for (int i = 0; i < count; i++) {
-            points.add(new PointSeries(labels.get(i), descriptions.get(i), frames.positions(i, metres)));
+            String label = labels.get(i);
+            if (label.isEmpty() || !computed.contains(label)) {
+                points.add(new PointSeries(label, descriptions.get(i), frames.positions(i, metres)));
+            }
         }
-        return points;
+        if (points.size() < count) {
+            reading.note(Notices.computedPoints(reading.file(), count - points.size()));
+        }
+        return RepeatedLabels.resolve(points, reading);
     }
 
     private List<AnalogChannel> channels(Frames frames, AnalogScaling scaling) {
