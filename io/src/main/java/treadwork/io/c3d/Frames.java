@@ -47,7 +47,10 @@ final class Frames {
         return seen ? number.at(chunk, at + coordinateAt) * metres : Double.NaN;
     }
 
-    /** The course of an analog channel: (stored - offset) × scale. */
+    /**
+     * The course of an analog channel: (stored - offset) × scale, of which the 24 bits are kept that the scale has. So what is written
+     * as reals again comes back to the bit.
+     */
     ScalarSeries channel(int channel, AnalogScaling scaling) {
         AnalogLayout analog = layout.analog();
         int samples = analog.samples();
@@ -59,8 +62,8 @@ final class Frames {
             int frame = i / samples;
             int place = from + (i - frame * samples) * analog.channels();
             float stored = number.at(bytes.get(chunks.of(frame)), chunks.byteOf(frame) + place * number.width());
-            double value = ((stored < 0 ? stored + wrap : stored) - offset) * scale;
-            return Math.abs(value) <= Double.MAX_VALUE ? value : Double.NaN;
+            float value = (float) (((stored < 0 ? stored + wrap : stored) - offset) * scale);
+            return Math.abs(value) <= Float.MAX_VALUE ? value : Double.NaN;
         });
     }
 }

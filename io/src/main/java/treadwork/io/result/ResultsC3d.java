@@ -10,6 +10,9 @@ import treadwork.io.c3d.C3dWriter;
 import treadwork.io.c3d.ComputedPoint;
 import treadwork.io.c3d.ComputedPoints;
 import treadwork.model.capture.Capture;
+import treadwork.model.finding.Finding;
+import treadwork.model.finding.Severity;
+import treadwork.model.finding.UnusableInputException;
 import treadwork.model.load.Contact;
 import treadwork.model.load.ContactSeries;
 import treadwork.model.load.JointLoads;
@@ -54,7 +57,19 @@ final class ResultsC3d {
         all.reactions();
         ComputedPoints computed =
                 new ComputedPoints(record.programVersion(), all.points, SettingsLines.of(record, result.up()));
-        C3dWriter.write(source.movement(), computed, file);
+        try {
+            C3dWriter.write(source.movement(), computed, file);
+        } catch (IllegalArgumentException tooMuch) {
+            throw new UnusableInputException(
+                    new Finding(
+                            "results-c3d",
+                            Severity.REFUSES,
+                            source.movement().name(),
+                            "a C3D file cannot hold the capture and its results together: " + tooMuch.getMessage(),
+                            "Nothing is written for this trial",
+                            "Compute it without --c3d"),
+                    tooMuch);
+        }
     }
 
     private void centre(JointLoads loads, VectorSeries centre) {
