@@ -126,20 +126,12 @@ public class ReadingBenchmark {
         for (int i = 0; i < POINTS; i++) {
             double[] course = random.doubles(3L * FRAMES, -1, 1).toArray();
             int skipped = random.nextInt(50);
-            points.add(new PointSeries(
-                    "P" + i,
-                    "",
-                    VectorSeries.lookedUp(
-                            frames,
-                            frame -> (frame + skipped) % 50 == 0 ? Double.NaN : course[frame % FRAMES],
-                            frame -> course[FRAMES + frame % FRAMES],
-                            frame -> course[2 * FRAMES + frame % FRAMES])));
+            points.add(PointSeries.recorded("P" + i, "", () -> course(course, frames, skipped)));
         }
         List<AnalogChannel> channels = new ArrayList<>();
         for (int i = 0; i < CHANNELS; i++) {
             double[] course = random.doubles(FRAMES, -1000, 1000).toArray();
-            ScalarSeries values = ScalarSeries.lookedUp(frames * SAMPLES, sample -> course[sample % FRAMES]);
-            channels.add(new AnalogChannel("A" + i, "N", values));
+            channels.add(AnalogChannel.recorded("A" + i, "N", () -> course(course, frames * SAMPLES)));
         }
         return new Capture(
                 "bench.c3d",
@@ -155,5 +147,22 @@ public class ReadingBenchmark {
                 LengthUnit.MM,
                 "",
                 List.of());
+    }
+
+    private static VectorSeries course(double[] course, int frames, int skipped) {
+        VectorSeries.Builder series = new VectorSeries.Builder(frames);
+        for (int i = 0; i < frames; i++) {
+            double x = (i + skipped) % 50 == 0 ? Double.NaN : course[i % FRAMES];
+            series.set(i, x, course[FRAMES + i % FRAMES], course[2 * FRAMES + i % FRAMES]);
+        }
+        return series.build();
+    }
+
+    private static ScalarSeries course(double[] course, int samples) {
+        ScalarSeries.Builder series = new ScalarSeries.Builder(samples);
+        for (int i = 0; i < samples; i++) {
+            series.set(i, course[i % FRAMES]);
+        }
+        return series.build();
     }
 }

@@ -137,7 +137,8 @@ public final class C3dReader {
         for (int i = 0; i < count; i++) {
             String label = labels.get(i);
             if (label.isEmpty() || !computed.contains(label)) {
-                points.add(new PointSeries(label, descriptions.get(i), frames.positions(i, metres)));
+                int point = i;
+                points.add(PointSeries.recorded(label, descriptions.get(i), () -> frames.positions(point, metres)));
             }
         }
         if (points.size() < count) {
@@ -152,7 +153,8 @@ public final class C3dReader {
         List<String> units = Labels.of(opening.parameters(), "ANALOG:UNITS", count);
         List<AnalogChannel> channels = new ArrayList<>(count);
         for (int i = 0; i < count; i++) {
-            channels.add(new AnalogChannel(labels.get(i), units.get(i), frames.channel(i, scaling)));
+            int channel = i;
+            channels.add(AnalogChannel.recorded(labels.get(i), units.get(i), () -> frames.channel(channel, scaling)));
         }
         return channels;
     }

@@ -100,9 +100,11 @@ public final class C3dWriter {
         List<PointSeries> points = new ArrayList<>(capture.points());
         for (ComputedPoint point : computed.points()) {
             VectorSeries values = point.values();
-            VectorSeries inUnits = VectorSeries.lookedUp(
-                    values.size(), i -> values.x(i) * unit, i -> values.y(i) * unit, i -> values.z(i) * unit);
-            points.add(new PointSeries(point.label(), point.description(), inUnits));
+            VectorSeries.Builder inUnits = new VectorSeries.Builder(values.size());
+            for (int i = 0; i < values.size(); i++) {
+                inUnits.set(i, values.at(i).times(unit));
+            }
+            points.add(new PointSeries(point.label(), point.description(), inUnits.build()));
         }
         return new Capture(
                 capture.name(),

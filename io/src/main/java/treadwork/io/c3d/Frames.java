@@ -5,7 +5,7 @@ import treadwork.model.space.ScalarSeries;
 import treadwork.model.space.VectorSeries;
 
 /**
- * The frames as they lie in the file, and the series that look their numbers up there.
+ * The frames as they lie in the file, and the series that are made from them when they are asked for.
  *
  * <p>They stay in the file's own precision: widened to doubles, and sorted by series, reading took five times as long as the bytes
  * alone, and the series up to four times their room, most of it for channels that nobody asks for.
@@ -31,20 +31,24 @@ final class Frames {
      * @param metres in one step of a stored coordinate
      */
     VectorSeries positions(int point, double metres) {
-        int place = point * Layout.POINT_VALUES;
         int width = number.width();
-        return VectorSeries.lookedUp(
-                layout.span().count(),
-                i -> coordinate(i, place * width, 0, metres),
-                i -> coordinate(i, place * width, width, metres),
-                i -> coordinate(i, place * width, 2 * width, metres));
-    }
-
-    private double coordinate(int frame, int pointAt, int coordinateAt, double metres) {
-        byte[] chunk = bytes.get(chunks.of(frame));
-        int at = chunks.byteOf(frame) + pointAt;
-        boolean seen = number.firstUnseen(chunk, at, 0, 1) == 1;
-        return seen ? number.at(chunk, at + coordinateAt) * metres : Double.NaN;
+        int pointAt = point * Layout.POINT_VALUES * width;
+        int frames = layout.span().count();
+        VectorSeries.Builder course = new VectorSeries.Builder(frames);
+        for (int i = 0; i < frames; i++) {
+            byte[] chunk = bytes.get(chunks.of(i));
+            int at = chunks.byteOf(i) + pointAt;
+            if (number.firstUnseen(chunk, at, 0, 1) == 1) {
+                course.set(
+                        i,
+                        number.at(chunk, at) * metres,
+                        number.at(chunk, at + width) * metres,
+                        number.at(chunk, at + 2 * width) * metres);
+            } else {
+                course.set(i, Double.NaN, Double.NaN, Double.NaN);
+            }
+        }
+        return course.build();
     }
 
     /**
@@ -58,12 +62,18 @@ final class Frames {
         double scale = scaling.scale(channel);
         int wrap = scaling.unsigned() && !layout.real() ? AnalogScaling.WRAP : 0;
         int from = layout.points() * Layout.POINT_VALUES + channel;
-        return ScalarSeries.lookedUp(layout.span().count() * samples, i -> {
-            int frame = i / samples;
-            int place = from + (i - frame * samples) * analog.channels();
-            float stored = number.at(bytes.get(chunks.of(frame)), chunks.byteOf(frame) + place * number.width());
-            float value = (float) (((stored < 0 ? stored + wrap : stored) - offset) * scale);
-            return Math.abs(value) <= Float.MAX_VALUE ? value : Double.NaN;
-        });
+        int frames = layout.span().count();
+        ScalarSeries.Builder course = new ScalarSeries.Builder(frames * samples);
+        for (int i = 0; i < frames; i++) {
+            byte[] chunk = bytes.get(chunks.of(i));
+            int at = chunks.byteOf(i) + from * number.width();
+            for (int sample = 0; sample < samples; sample++) {
+                float stored = number.at(chunk, at);
+                float value = (float) (((stored < 0 ? stored + wrap : stored) - offset) * scale);
+                course.set(i * samples + sample, Math.abs(value) <= Float.MAX_VALUE ? value : Double.NaN);
+                at += analog.channels() * number.width();
+            }
+        }
+        return course.build();
     }
 }

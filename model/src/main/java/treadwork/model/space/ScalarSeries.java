@@ -1,36 +1,15 @@
 package treadwork.model.space;
 
 import java.util.Arrays;
-import java.util.function.IntToDoubleFunction;
 import java.util.function.UnaryOperator;
 
-/** One number a frame or sample; NaN is a gap. What was recorded may stay where it lies, see {@link #lookedUp}. */
+/** One number a frame or sample; NaN is a gap. */
 public final class ScalarSeries {
 
-    private static final double[] NONE = {};
-
     private final double[] values;
-    private final Recorded recorded;
-
-    /** Where the numbers are looked up that are not in the array; null where they are. */
-    private record Recorded(int size, IntToDoubleFunction at) {}
 
     private ScalarSeries(double[] values) {
         this.values = values;
-        this.recorded = null;
-    }
-
-    private ScalarSeries(Recorded recorded) {
-        this.values = NONE;
-        this.recorded = recorded;
-    }
-
-    /**
-     * A series whose numbers stay where they lie, in whatever precision they were recorded, and are looked up one by one. The same
-     * index must give the same number for ever, on any thread.
-     */
-    public static ScalarSeries lookedUp(int size, IntToDoubleFunction at) {
-        return new ScalarSeries(new Recorded(size, at));
     }
 
     public static ScalarSeries of(double... values) {
@@ -45,36 +24,28 @@ public final class ScalarSeries {
     }
 
     public int size() {
-        return recorded == null ? values.length : recorded.size;
+        return values.length;
     }
 
     public double at(int i) {
-        return recorded == null ? values[i] : recorded.at.applyAsDouble(i);
+        return values[i];
     }
 
     /** A copy of the values. */
     public double[] toArray() {
-        return recorded == null ? values.clone() : copy(recorded.size, recorded.at);
-    }
-
-    static double[] copy(int size, IntToDoubleFunction at) {
-        double[] copy = new double[size];
-        for (int i = 0; i < size; i++) {
-            copy[i] = at.applyAsDouble(i);
-        }
-        return copy;
+        return values.clone();
     }
 
     /** The series that {@code operation} makes of a copy of the values; what it returns is kept, so it must not go on writing there. */
     public ScalarSeries map(UnaryOperator<double[]> operation) {
-        return new ScalarSeries(operation.apply(toArray()));
+        return new ScalarSeries(operation.apply(values.clone()));
     }
 
     /** The samples from {@code from} on, every {@code step}th, {@code count} of them. */
     public ScalarSeries every(int from, int step, int count) {
         double[] picked = new double[count];
         for (int i = 0; i < count; i++) {
-            picked[i] = at(from + i * step);
+            picked[i] = values[from + i * step];
         }
         return new ScalarSeries(picked);
     }

@@ -1,31 +1,14 @@
 package treadwork.model.space;
 
 import java.util.Arrays;
-import java.util.function.IntToDoubleFunction;
 import java.util.function.UnaryOperator;
 
-/**
- * One vector a frame or sample; a vector with a NaN is a gap. What is computed is held as three arrays, so that filters run along
- * memory; what was recorded may stay where it lies, see {@link #lookedUp}.
- */
+/** One vector a frame or sample, held as three arrays so that filters run along memory; a vector with a NaN is a gap. */
 public final class VectorSeries {
-
-    private static final double[] NONE = {};
 
     private final double[] x;
     private final double[] y;
     private final double[] z;
-    private final Recorded recorded;
-
-    /** Where the numbers are looked up that are not in the arrays; null where they are. */
-    private record Recorded(int size, IntToDoubleFunction x, IntToDoubleFunction y, IntToDoubleFunction z) {}
-
-    private VectorSeries(Recorded recorded) {
-        this.x = NONE;
-        this.y = NONE;
-        this.z = NONE;
-        this.recorded = recorded;
-    }
 
     private VectorSeries(double[] x, double[] y, double[] z) {
         if (x.length != y.length || x.length != z.length) {
@@ -35,15 +18,6 @@ public final class VectorSeries {
         this.x = x;
         this.y = y;
         this.z = z;
-        this.recorded = null;
-    }
-
-    /**
-     * A series whose numbers stay where they lie, in whatever precision they were recorded, and are looked up one by one. The same
-     * index must give the same number for ever, on any thread.
-     */
-    public static VectorSeries lookedUp(int size, IntToDoubleFunction x, IntToDoubleFunction y, IntToDoubleFunction z) {
-        return new VectorSeries(new Recorded(size, x, y, z));
     }
 
     public static VectorSeries of(double[] x, double[] y, double[] z) {
@@ -67,44 +41,32 @@ public final class VectorSeries {
     }
 
     public int size() {
-        return recorded == null ? x.length : recorded.size;
+        return x.length;
     }
 
     public Vector3 at(int i) {
-        return new Vector3(x(i), y(i), z(i));
+        return new Vector3(x[i], y[i], z[i]);
     }
 
     public double x(int i) {
-        return recorded == null ? x[i] : recorded.x.applyAsDouble(i);
+        return x[i];
     }
 
     public double y(int i) {
-        return recorded == null ? y[i] : recorded.y.applyAsDouble(i);
+        return y[i];
     }
 
     public double z(int i) {
-        return recorded == null ? z[i] : recorded.z.applyAsDouble(i);
+        return z[i];
     }
 
     public boolean isGap(int i) {
-        return Double.isNaN(x(i) + y(i) + z(i));
+        return Double.isNaN(x[i] + y[i] + z[i]);
     }
 
     /** Applies {@code operation} to a copy of each component; what it returns is kept, so it must not go on writing there. */
     public VectorSeries eachComponent(UnaryOperator<double[]> operation) {
-        return new VectorSeries(operation.apply(copyX()), operation.apply(copyY()), operation.apply(copyZ()));
-    }
-
-    private double[] copyX() {
-        return recorded == null ? x.clone() : ScalarSeries.copy(recorded.size, recorded.x);
-    }
-
-    private double[] copyY() {
-        return recorded == null ? y.clone() : ScalarSeries.copy(recorded.size, recorded.y);
-    }
-
-    private double[] copyZ() {
-        return recorded == null ? z.clone() : ScalarSeries.copy(recorded.size, recorded.z);
+        return new VectorSeries(operation.apply(x.clone()), operation.apply(y.clone()), operation.apply(z.clone()));
     }
 
     /** The samples from {@code from} on, every {@code step}th, {@code count} of them. */
@@ -117,15 +79,15 @@ public final class VectorSeries {
     }
 
     public ScalarSeries componentX() {
-        return recorded == null ? ScalarSeries.of(x) : ScalarSeries.lookedUp(recorded.size, recorded.x);
+        return ScalarSeries.of(x);
     }
 
     public ScalarSeries componentY() {
-        return recorded == null ? ScalarSeries.of(y) : ScalarSeries.lookedUp(recorded.size, recorded.y);
+        return ScalarSeries.of(y);
     }
 
     public ScalarSeries componentZ() {
-        return recorded == null ? ScalarSeries.of(z) : ScalarSeries.lookedUp(recorded.size, recorded.z);
+        return ScalarSeries.of(z);
     }
 
     /** Fills a series vector by vector. */
