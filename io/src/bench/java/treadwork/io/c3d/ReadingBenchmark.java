@@ -1,6 +1,7 @@
 package treadwork.io.c3d;
 
 import java.io.IOException;
+import java.io.OutputStream;
 import java.nio.ByteBuffer;
 import java.nio.channels.FileChannel;
 import java.nio.file.Files;
@@ -49,7 +50,7 @@ public class ReadingBenchmark {
     private static final int SAMPLES = 10;
     private static final int BUFFER = 1 << 20;
 
-    /** Frames of the recording that the files are made of. */
+    /** Frames of the recording that the files repeat; as reals and as integers a whole number of blocks. */
     private static final int FRAMES = 1000;
 
     @Param({"1", "250"})
@@ -68,12 +69,20 @@ public class ReadingBenchmark {
     public void writeFiles() throws IOException {
         folder = Files.createTempDirectory("treadwork-bench");
         C3dEncoding encoding = new C3dEncoding(processor, storage, false);
-        int frameBytes = (POINTS * 4 + CHANNELS * SAMPLES) * (encoding.real() ? Float.BYTES : Short.BYTES);
-        int frames = (int) (BYTES / files / frameBytes);
-        Capture capture = recording(frames);
+        byte[] whole = C3dWriter.bytes(recording(FRAMES), encoding);
+        int data = FRAMES * (POINTS * 4 + CHANNELS * SAMPLES) * (encoding.real() ? Float.BYTES : Short.BYTES);
+        int opening = whole.length - data;
+        // A full counter: the size of the file says how many frames there are.
+        whole[Header.LAST_AT] = -1;
+        whole[Header.LAST_AT + 1] = -1;
         for (int i = 0; i < files; i++) {
             Path file = folder.resolve(i + ".c3d");
-            C3dWriter.write(capture, encoding, file);
+            try (OutputStream out = Files.newOutputStream(file)) {
+                out.write(whole, 0, opening);
+                for (long written = 0; written + data <= BYTES / files; written += data) {
+                    out.write(whole, opening, data);
+                }
+            }
             paths.add(file);
         }
     }
