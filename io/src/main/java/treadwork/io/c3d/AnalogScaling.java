@@ -6,6 +6,9 @@ import java.util.Locale;
 /** Offset and scale of every analog channel. */
 final class AnalogScaling {
 
+    /** What an unsigned 16-bit number is more than the signed one of the same bits, when that is below zero. */
+    static final int WRAP = 0x10000;
+
     private final double[] offsets;
     private final double[] scales;
     private final boolean unsigned;
@@ -33,7 +36,7 @@ final class AnalogScaling {
         double general = filled(parameters, "GEN_SCALE", 1, reading)[0];
         for (int i = 0; i < channels; i++) {
             scales[i] *= general;
-            offsets[i] += unsigned && offsets[i] < 0 ? 0x10000 : 0;
+            offsets[i] += unsigned && offsets[i] < 0 ? WRAP : 0;
         }
         return new AnalogScaling(offsets, scales, unsigned);
     }

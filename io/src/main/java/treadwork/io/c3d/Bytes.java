@@ -17,6 +17,14 @@ sealed interface Bytes {
      */
     ByteBuffer at(long offset, int length) throws IOException;
 
+    /**
+     * Copies {@code length} bytes from {@code offset} on to {@code to}, from its byte {@code at} on. Several threads may do so at
+     * the same time.
+     *
+     * @throws EOFException if there are not so many
+     */
+    void copy(long offset, byte[] to, int at, int length) throws IOException;
+
     /** Bytes in memory. */
     final class Held implements Bytes {
 
@@ -37,6 +45,14 @@ sealed interface Bytes {
                 throw new EOFException();
             }
             return ByteBuffer.wrap(bytes, (int) offset, length).slice();
+        }
+
+        @Override
+        public void copy(long offset, byte[] to, int at, int length) throws EOFException {
+            if (offset > bytes.length - length) {
+                throw new EOFException();
+            }
+            System.arraycopy(bytes, (int) offset, to, at, length);
         }
     }
 
@@ -66,12 +82,22 @@ sealed interface Bytes {
                 buffer = ByteBuffer.allocate(length);
             }
             buffer.clear().limit(length);
-            while (buffer.hasRemaining()) {
-                if (channel.read(buffer, offset + buffer.position()) < 0) {
+            fill(buffer, offset);
+            return buffer.flip();
+        }
+
+        @Override
+        public void copy(long offset, byte[] to, int at, int length) throws IOException {
+            fill(ByteBuffer.wrap(to, at, length), offset);
+        }
+
+        private void fill(ByteBuffer into, long offset) throws IOException {
+            long place = offset - into.position();
+            while (into.hasRemaining()) {
+                if (channel.read(into, place + into.position()) < 0) {
                     throw new EOFException();
                 }
             }
-            return buffer.flip();
         }
     }
 }

@@ -8,6 +8,7 @@ import java.nio.file.StandardOpenOption;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.CaptureEvent;
@@ -16,8 +17,6 @@ import treadwork.model.capture.LengthUnit;
 import treadwork.model.capture.Plate;
 import treadwork.model.capture.PointSeries;
 import treadwork.model.finding.UnusableInputException;
-import treadwork.model.space.ScalarSeries;
-import treadwork.model.space.VectorSeries;
 
 /**
  * Reads capture files in the C3D format: three processor families, integers and reals, and the oddities of real files.
@@ -100,21 +99,20 @@ public final class C3dReader {
         AnalogScaling scaling = AnalogScaling.of(parameters, layout.analog().channels(), reading);
         List<Plate> plates =
                 options.filePlates() ? new PlateReader(parameters, layout.analog(), unit, reading).read() : List.of();
-        PointCourses points = new PointCourses(layout, scale(parameters) * unit.metres());
-        AnalogCourses analog = new AnalogCourses(layout, scaling);
-        SampleReader.read(bytes, layout, points, analog);
+        double metres = scale(parameters) * unit.metres();
+        Frames frames = FrameReader.read(bytes, layout, reading);
         List<CaptureEvent> events = EventReader.read(opening, firstBlock, span, rate, reading);
         String storage = layout.storage() + (scaling.unsigned() ? ", unsigned analog" : "");
-        List<PointSeries> pointSeries = points(points.finish(span.count(), reading));
+        List<PointSeries> points = points(frames, metres);
         Optional<FrameRange> zero = plateZero(parameters);
         return new Capture(
                 reading.file(),
                 span.first(),
                 span.count(),
                 rate,
-                pointSeries,
+                points,
                 layout.analog().samples(),
-                channels(analog.finish()),
+                channels(frames, scaling),
                 plates,
                 zero,
                 events,
@@ -123,23 +121,40 @@ public final class C3dReader {
                 reading.findings());
     }
 
-    private List<PointSeries> points(List<VectorSeries> positions) {
+    /** Those that were measured: what this program computed and wrote beside them are no markers. */
+    private List<PointSeries> points(Frames frames, double metres) {
         Parameters parameters = opening.parameters();
-        List<String> labels = Labels.withoutSubject(Labels.of(parameters, "POINT:LABELS", positions.size()));
-        List<String> descriptions = Labels.of(parameters, "POINT:DESCRIPTIONS", positions.size());
-        List<PointSeries> points = new ArrayList<>(positions.size());
-        for (int i = 0; i < positions.size(); i++) {
-            points.add(new PointSeries(labels.get(i), descriptions.get(i), positions.get(i)));
+        int count = layout.points();
+        List<String> labels = Labels.withoutSubject(Labels.of(parameters, "POINT:LABELS", count));
+        List<String> subjects = Labels.subjects(labels);
+        if (subjects.size() > 1) {
+            reading.note(Notices.subjects(reading.file(), subjects));
         }
-        return points;
+        List<String> descriptions = Labels.of(parameters, "POINT:DESCRIPTIONS", count);
+        Set<String> computed =
+                Set.copyOf(parameters.texts(ComputedPoints.GROUP + ":" + ComputedPoints.LABELS, layout.points()));
+        List<PointSeries> points = new ArrayList<>(count);
+        for (int i = 0; i < count; i++) {
+            String label = labels.get(i);
+            if (label.isEmpty() || !computed.contains(label)) {
+                int point = i;
+                points.add(PointSeries.recorded(label, descriptions.get(i), () -> frames.positions(point, metres)));
+            }
+        }
+        if (points.size() < count) {
+            reading.note(Notices.computedPoints(reading.file(), count - points.size()));
+        }
+        return RepeatedLabels.resolve(points, reading);
     }
 
-    private List<AnalogChannel> channels(List<ScalarSeries> values) {
-        List<String> labels = Labels.of(opening.parameters(), "ANALOG:LABELS", values.size());
-        List<String> units = Labels.of(opening.parameters(), "ANALOG:UNITS", values.size());
-        List<AnalogChannel> channels = new ArrayList<>(values.size());
-        for (int i = 0; i < values.size(); i++) {
-            channels.add(new AnalogChannel(labels.get(i), units.get(i), values.get(i)));
+    private List<AnalogChannel> channels(Frames frames, AnalogScaling scaling) {
+        int count = layout.analog().channels();
+        List<String> labels = Labels.of(opening.parameters(), "ANALOG:LABELS", count);
+        List<String> units = Labels.of(opening.parameters(), "ANALOG:UNITS", count);
+        List<AnalogChannel> channels = new ArrayList<>(count);
+        for (int i = 0; i < count; i++) {
+            int channel = i;
+            channels.add(AnalogChannel.recorded(labels.get(i), units.get(i), () -> frames.channel(channel, scaling)));
         }
         return channels;
     }

@@ -10,7 +10,14 @@ import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
 import treadwork.model.capture.Capture;
+import treadwork.model.capture.PointSeries;
+import treadwork.model.space.VectorSeries;
 
 /**
  * Writes captures as C3D files.
@@ -28,8 +35,13 @@ public final class C3dWriter {
     private final Capture capture;
     private final C3dEncoding encoding;
     private final WriteScaling scaling;
+    private final Optional<ComputedPoints> computed;
 
     private C3dWriter(Capture capture, C3dEncoding encoding) {
+        this(capture, encoding, Optional.empty());
+    }
+
+    private C3dWriter(Capture capture, C3dEncoding encoding, Optional<ComputedPoints> computed) {
         require(
                 capture.points().size() <= Header.FULL,
                 "points",
@@ -40,6 +52,7 @@ public final class C3dWriter {
         this.capture = capture;
         this.encoding = encoding;
         this.scaling = WriteScaling.of(capture, encoding);
+        this.computed = computed;
     }
 
     private static void require(boolean possible, String what, long number) {
@@ -54,11 +67,66 @@ public final class C3dWriter {
      * @throws IllegalArgumentException if the format cannot hold the capture
      */
     public static void write(Capture capture, C3dEncoding encoding, Path file) throws IOException {
-        C3dWriter writer = new C3dWriter(capture, encoding);
+        new C3dWriter(capture, encoding).write(file);
+    }
+
+    /**
+     * Writes a file of reals with what was computed from the capture as further points; else like {@link #write(Capture,
+     * C3dEncoding, Path)}. A computed label that a marker of the capture bears gets an ending of its own.
+     *
+     * @throws IllegalArgumentException if the format cannot hold all of it
+     */
+    public static void write(Capture capture, ComputedPoints computed, Path file) throws IOException {
+        ComputedPoints named = withOwnLabels(computed, capture);
+        new C3dWriter(withPoints(capture, named), C3dEncoding.DEFAULT, Optional.of(named)).write(file);
+    }
+
+    private static ComputedPoints withOwnLabels(ComputedPoints computed, Capture capture) {
+        Set<String> taken = capture.points().stream().map(PointSeries::label).collect(Collectors.toSet());
+        List<ComputedPoint> named = new ArrayList<>();
+        for (ComputedPoint point : computed.points()) {
+            String label = point.label();
+            while (!taken.add(label)) {
+                label = label + "_computed";
+            }
+            named.add(new ComputedPoint(label, point.description(), point.unit(), point.values()));
+        }
+        return new ComputedPoints(computed.version(), named, computed.settings());
+    }
+
+    /** Positions are written in the file's unit of length, which is taken off the computed numbers beforehand. */
+    private static Capture withPoints(Capture capture, ComputedPoints computed) {
+        double unit = capture.pointUnit().metres();
+        List<PointSeries> points = new ArrayList<>(capture.points());
+        for (ComputedPoint point : computed.points()) {
+            VectorSeries values = point.values();
+            VectorSeries.Builder inUnits = new VectorSeries.Builder(values.size());
+            for (int i = 0; i < values.size(); i++) {
+                inUnits.set(i, values.at(i).times(unit));
+            }
+            points.add(new PointSeries(point.label(), point.description(), inUnits.build()));
+        }
+        return new Capture(
+                capture.name(),
+                capture.firstFrame(),
+                capture.frames(),
+                capture.pointRate(),
+                points,
+                capture.samplesPerFrame(),
+                capture.analog(),
+                capture.plates(),
+                capture.plateZero(),
+                capture.events(),
+                capture.pointUnit(),
+                capture.storage(),
+                capture.findings());
+    }
+
+    private void write(Path file) throws IOException {
         Path part = file.resolveSibling(file.getFileName() + ".part");
         try {
             try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(part))) {
-                writer.write(out);
+                write(out);
             }
             moveTo(part, file);
         } finally {
@@ -90,7 +158,7 @@ public final class C3dWriter {
     }
 
     private void write(OutputStream out) throws IOException {
-        byte[] section = new SectionWriter(capture, encoding, scaling).section();
+        byte[] section = new SectionWriter(capture, encoding, scaling, computed).section();
         out.write(header(PARAMETER_BLOCK + section.length / Header.BLOCK));
         out.write(section);
         new FrameWriter(capture, encoding, scaling).write(out);

@@ -7,6 +7,7 @@ import java.util.List;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.PointSeries;
+import treadwork.model.space.ScalarSeries;
 import treadwork.model.space.VectorSeries;
 
 /** Writes the frames: points, then the frame's analog samples. */
@@ -35,13 +36,17 @@ final class FrameWriter {
 
     /** Writes all frames and fills up the last block. */
     void write(OutputStream out) throws IOException {
+        List<VectorSeries> positions =
+                capture.points().stream().map(PointSeries::positions).toList();
+        List<ScalarSeries> values =
+                capture.analog().stream().map(AnalogChannel::values).toList();
         for (int i = 0; i < capture.frames(); i++) {
             frame.clear();
-            for (PointSeries point : capture.points()) {
-                putPoint(point.positions(), i);
+            for (VectorSeries each : positions) {
+                putPoint(each, i);
             }
             for (int sample = 0; sample < capture.samplesPerFrame(); sample++) {
-                putSample(i * capture.samplesPerFrame() + sample);
+                putSample(values, i * capture.samplesPerFrame() + sample);
             }
             out.write(frame.array());
         }
@@ -71,10 +76,9 @@ final class FrameWriter {
         frame.putShort((short) (gap ? GAP : 0));
     }
 
-    private void putSample(int sample) {
-        List<AnalogChannel> channels = capture.analog();
-        for (int i = 0; i < channels.size(); i++) {
-            double value = channels.get(i).values().at(sample);
+    private void putSample(List<ScalarSeries> values, int sample) {
+        for (int i = 0; i < values.size(); i++) {
+            double value = values.get(i).at(sample);
             if (encoding.real()) {
                 putReal((float) value);
             } else {

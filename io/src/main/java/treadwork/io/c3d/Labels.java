@@ -2,6 +2,8 @@ package treadwork.io.c3d;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import java.util.TreeSet;
 
 /** Labels of points or channels. */
 final class Labels {
@@ -43,5 +45,21 @@ final class Labels {
                         ? label.substring(common.length()).strip()
                         : label)
                 .toList();
+    }
+
+    /** The subjects that named points bear before a colon, where every one bears one. */
+    static List<String> subjects(List<String> labels) {
+        Set<String> subjects = new TreeSet<>();
+        for (String label : labels) {
+            if (label.isEmpty() || label.charAt(0) == UNNAMED) {
+                continue;
+            }
+            int colon = label.indexOf(':');
+            if (colon < 1) {
+                return List.of();
+            }
+            subjects.add(label.substring(0, colon));
+        }
+        return List.copyOf(subjects);
     }
 }

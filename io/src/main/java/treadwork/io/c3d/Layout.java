@@ -22,8 +22,8 @@ record Layout(Processor processor, boolean real, int points, AnalogLayout analog
 
     private static final double MEGABYTE = 1 << 20;
 
-    /** About what the objects around the values of one course take. */
-    private static final double SERIES_BYTES = 300;
+    /** About what the objects take through which one course is looked up. */
+    private static final double SERIES_BYTES = 400;
 
     /** Part of all memory that one recording may take, so that there is some left to compute with. */
     private static final double USABLE = 0.8;
@@ -100,8 +100,7 @@ record Layout(Processor processor, boolean real, int points, AnalogLayout analog
 
     /** Refuses a recording that cannot be held, before anything is set aside for it. */
     private void requireMemory(Reading reading) {
-        double perFrame = 3.0 * Double.BYTES * points + (double) Double.BYTES * analog.values();
-        double needed = span.count() * perFrame + SERIES_BYTES * ((double) points + analog.channels());
+        double needed = (double) span.count() * frameBytes() + SERIES_BYTES * ((double) points + analog.channels());
         double free = Runtime.getRuntime().maxMemory() * USABLE;
         boolean countable = (double) span.count() * analog.samples() < LONGEST_ARRAY;
         if (needed > free || !countable) {
@@ -109,10 +108,7 @@ record Layout(Processor processor, boolean real, int points, AnalogLayout analog
         }
     }
 
-    int values() {
-        return points * POINT_VALUES + analog.values();
-    }
-
+    /** Bytes in a frame. */
     int frameBytes() {
         return (int) frameBytes(real, points, analog);
     }

@@ -162,6 +162,46 @@ final class Notices {
                 "Export the file again with the positions marked as valid");
     }
 
+    static Finding computedPoints(String file, int points) {
+        return new Finding(
+                "points-computed",
+                NOTE,
+                file + ", group " + ComputedPoints.GROUP,
+                points + " points are results of an earlier computation",
+                "They are no markers and are left out",
+                NOTHING);
+    }
+
+    static Finding labelCollapsed(String file, List<String> labels) {
+        return new Finding(
+                "label-same-twice",
+                NOTE,
+                file + ", points " + listed(labels),
+                "they are stored more than once with the same positions",
+                "One of each is kept",
+                NOTHING);
+    }
+
+    static Finding labelAmbiguous(String file, List<String> labels) {
+        return new Finding(
+                "label-ambiguous",
+                NOTE,
+                file + ", points " + listed(labels),
+                "more than one point bears the name, with different positions",
+                "None of them can be used as a marker, since the name does not say which is meant",
+                "Give them different names in the file if they are needed; their descriptions may tell them apart");
+    }
+
+    static Finding subjects(String file, List<String> subjects) {
+        return new Finding(
+                "subjects-several",
+                NOTE,
+                file + ", parameter POINT:LABELS",
+                "the points belong to " + subjects.size() + " subjects or objects: " + listed(subjects),
+                "Labels keep their subject, as in \"" + subjects.get(0) + ":NAME\"",
+                "Name markers with their subject in the marker set");
+    }
+
     static Finding plateGroup(String file, String similar) {
         return new Finding(
                 "plate-group-name",

@@ -54,15 +54,4 @@ public enum Processor {
     int word(float value) {
         return this == DEC ? VaxReal.encode(value) : Float.floatToRawIntBits(value);
     }
-
-    /** Fills {@code to} with the first {@code count} real numbers of {@code from}. */
-    void reals(ByteBuffer from, float[] to, int count) {
-        if (this == DEC) {
-            for (int i = 0; i < count; i++) {
-                to[i] = VaxReal.decode(from.getInt(4 * i));
-            }
-        } else {
-            from.asFloatBuffer().get(to, 0, count);
-        }
-    }
 }

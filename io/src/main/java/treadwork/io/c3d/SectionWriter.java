@@ -3,6 +3,7 @@ package treadwork.io.c3d;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Optional;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.CalibrationMatrix;
 import treadwork.model.capture.Capture;
@@ -13,7 +14,7 @@ import treadwork.model.capture.PlateType;
 import treadwork.model.capture.PointSeries;
 import treadwork.model.space.Vector3;
 
-/** Fills the parameter section of a capture: groups POINT, ANALOG, FORCE_PLATFORM, TRIAL and EVENT. */
+/** Fills the parameter section of a capture: groups POINT, ANALOG, FORCE_PLATFORM, TRIAL and EVENT, and that of computed points. */
 final class SectionWriter {
 
     private static final int MINUTE_S = 60;
@@ -21,11 +22,13 @@ final class SectionWriter {
     private final Capture capture;
     private final C3dEncoding encoding;
     private final WriteScaling scaling;
+    private final Optional<ComputedPoints> computed;
 
-    SectionWriter(Capture capture, C3dEncoding encoding, WriteScaling scaling) {
+    SectionWriter(Capture capture, C3dEncoding encoding, WriteScaling scaling, Optional<ComputedPoints> computed) {
         this.capture = capture;
         this.encoding = encoding;
         this.scaling = scaling;
+        this.computed = computed;
     }
 
     /** The whole section, its length a number of blocks. */
@@ -41,6 +44,7 @@ final class SectionWriter {
         plates(records);
         trial(records);
         events(records);
+        computed.ifPresent(points -> computed(records, points));
         return records;
     }
 
@@ -155,6 +159,17 @@ final class SectionWriter {
         records.texts("CONTEXTS", events.stream().map(CaptureEvent::context).toList());
         records.texts("LABELS", events.stream().map(CaptureEvent::label).toList());
         records.pairs("TIMES", times);
+    }
+
+    private static void computed(ParameterWriter records, ComputedPoints computed) {
+        records.group(ComputedPoints.GROUP);
+        records.text("VERSION", computed.version());
+        records.texts(
+                ComputedPoints.LABELS,
+                computed.points().stream().map(ComputedPoint::label).toList());
+        records.texts(
+                "UNITS", computed.points().stream().map(ComputedPoint::unit).toList());
+        records.texts("SETTINGS", computed.settings());
     }
 
     private void requireUnit(Plate plate) {

@@ -8,6 +8,7 @@ import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.Set;
 import treadwork.io.file.JsonText;
 import treadwork.io.file.WholeFolder;
@@ -23,9 +24,10 @@ public final class TrialFiles {
     private static final String LOADS = "loads.csv";
     private static final String CONTACTS = "contacts.csv";
     private static final String TRIAL = "trial.json";
+    private static final String CAPTURE = "results.c3d";
 
     /** What may stand in such a folder; one with anything else in it is somebody's, and is not replaced. */
-    private static final Set<String> OWN = Set.of(LOADS, CONTACTS, TRIAL, "cycles.csv", "summary.csv");
+    private static final Set<String> OWN = Set.of(LOADS, CONTACTS, TRIAL, CAPTURE, "cycles.csv", "summary.csv");
 
     private TrialFiles() {}
 
@@ -41,12 +43,24 @@ public final class TrialFiles {
      *     results-folder-foreign} if files that are not results stand there
      */
     public static void write(Path trialFolder, TrialRecord record, TrialResult result) {
+        write(trialFolder, record, result, Optional.empty());
+    }
+
+    /**
+     * Writes the folder like {@link #write(Path, TrialRecord, TrialResult)}, with a C3D file of the results in it if there is what
+     * it is made from.
+     */
+    public static void write(
+            Path trialFolder, TrialRecord record, TrialResult result, Optional<ResultCapture> capture) {
         WholeFolder.write(trialFolder, OWN, folder -> {
             try (Writer loads = Files.newBufferedWriter(folder.resolve(LOADS), StandardCharsets.UTF_8)) {
                 LoadsCsv.write(result, record.trial().results(), loads);
             }
             try (Writer contacts = Files.newBufferedWriter(folder.resolve(CONTACTS), StandardCharsets.UTF_8)) {
                 ContactsCsv.write(result, contacts);
+            }
+            if (capture.isPresent()) {
+                ResultsC3d.write(capture.get(), result, record, folder.resolve(CAPTURE));
             }
             Files.writeString(folder.resolve(TRIAL), JsonText.of(TrialTree.of(record, result)));
         });
@@ -63,6 +77,11 @@ public final class TrialFiles {
         return Files.isRegularFile(trialFolder.resolve(LOADS))
                 && Files.isRegularFile(trialFolder.resolve(CONTACTS))
                 && key.equals(writtenKey(trialFolder.resolve(TRIAL)));
+    }
+
+    /** Whether a C3D file of the results stands in the folder. */
+    public static boolean holdsCapture(Path trialFolder) {
+        return Files.isRegularFile(trialFolder.resolve(CAPTURE));
     }
 
     /** The key that stands in a {@code trial.json}; empty where it cannot be read. */

@@ -277,7 +277,7 @@ class RefusedFilesTest {
         assertEquals(folder.toString(), finding.where());
     }
 
-    /** 65535 points × 24 bytes × 65535 frames are 103 GB as courses; the file itself is a hole of 68 GB. */
+    /** 65535 points × 16 bytes × 65535 frames are 65534 MB, held as they are stored; the file is a hole of that size. */
     @Test
     void aFileLargerThanTheMemory(@TempDir Path folder) throws IOException {
         byte[] opening = new FileBuilder()
@@ -299,7 +299,7 @@ class RefusedFilesTest {
 
         assertEquals("capture-too-large", finding.code());
         assertEquals("large.c3d", finding.where());
-        assertTrue(finding.figure().startsWith("its values take 98"), finding.figure());
+        assertTrue(finding.figure().startsWith("its values take 6555"), finding.figure());
     }
 
     private static void assertFinding(Finding finding, String code, String where, String figure) {

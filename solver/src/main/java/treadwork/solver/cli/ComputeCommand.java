@@ -54,6 +54,11 @@ final class ComputeCommand implements Callable<Integer> {
     @Option(names = "--again", description = "Compute trials whose results are up to date, too.")
     boolean again;
 
+    @Option(
+            names = "--c3d",
+            description = "Write results.c3d for each trial, too: the capture with the results as further points.")
+    boolean c3d;
+
     @Option(names = "--json", description = "Print the outcome as one JSON document.")
     boolean json;
 
@@ -71,7 +76,8 @@ final class ComputeCommand implements Callable<Integer> {
                 out == null ? document.folder().resolve("results") : out,
                 Optional.ofNullable(only),
                 threads == null ? Runtime.getRuntime().availableProcessors() : threads,
-                again);
+                again,
+                c3d);
         Progress progress = quiet.progress(spec.commandLine().getErr(), StudyRun.count(document, settings));
         List<TrialOutcome> outcomes = StudyRun.run(document, settings, progress::ended);
         progress.close();

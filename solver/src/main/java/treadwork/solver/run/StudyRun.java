@@ -13,6 +13,7 @@ import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.inertia.InertiaTables;
 import treadwork.io.result.InputFile;
+import treadwork.io.result.ResultCapture;
 import treadwork.io.result.TrialFiles;
 import treadwork.io.result.TrialRecord;
 import treadwork.io.study.FolderName;
@@ -127,17 +128,21 @@ public final class StudyRun {
         Trial trial = job.trial();
         StandingCaptures.Standing stood = standing.of(job.subject(), trial);
         TrialRecord record = new TrialRecord(ProgramVersion.TEXT, job.subject(), trial, inputs(stood, trial));
-        if (!settings.again() && TrialFiles.isUpToDate(folder, record.key())) {
+        boolean complete = !settings.c3d() || TrialFiles.holdsCapture(folder);
+        if (!settings.again() && TrialFiles.isUpToDate(folder, record.key()) && complete) {
             return new TrialOutcome(
                     job.name(), trial.condition(), TrialOutcome.Status.UP_TO_DATE, folder, Optional.empty(), List.of());
         }
+        Capture movement = movement(trial);
         ComputedTrial computed = TrialComputation.compute(new TrialInput(
                 stood.capture(),
-                movement(trial),
+                movement,
                 job.subject(),
                 trial,
                 InertiaTables.load(trial.body().inertia())));
-        TrialFiles.write(folder, record, computed.result());
+        Optional<ResultCapture> capture =
+                settings.c3d() ? Optional.of(new ResultCapture(movement, computed.centres())) : Optional.empty();
+        TrialFiles.write(folder, record, computed.result(), capture);
         return new TrialOutcome(
                 job.name(),
                 trial.condition(),

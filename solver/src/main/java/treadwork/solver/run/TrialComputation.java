@@ -2,6 +2,7 @@ package treadwork.solver.run;
 
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import treadwork.model.body.MassProperties;
 import treadwork.model.body.Segment;
 import treadwork.model.body.SegmentKind;
@@ -54,6 +55,9 @@ public final class TrialComputation {
                 measured.findings());
         return new ComputedTrial(
                 Cropping.to(input.trial().frames(), result, movement.name()),
+                joints.stream()
+                        .collect(Collectors.toMap(
+                                SolvedJoint::joint, solved -> solved.load().point())),
                 TrialSummary.of(joints, input.subject().massKg()));
     }
 

@@ -14,6 +14,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -21,6 +22,9 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import treadwork.fixtures.demo.DemoStudy;
+import treadwork.io.c3d.C3dReader;
+import treadwork.model.capture.Capture;
+import treadwork.model.capture.PointSeries;
 
 class ComputeCommandTest {
 
@@ -42,6 +46,29 @@ class ComputeCommandTest {
         }
         Map<String, byte[]> after = contents(folder);
         before.forEach((name, bytes) -> assertArrayEquals(bytes, after.get(name), name));
+    }
+
+    @Test
+    void aCaptureWithTheResultsIsWrittenWhereThatIsAskedFor() throws IOException {
+        SmallStudy study = SmallStudy.write(folder, 1);
+        Program.run("compute", "--quiet", study.file());
+        Path file = study.results().resolve("S01/walk-1/results.c3d");
+        byte[] input = Files.readAllBytes(study.walking(1));
+
+        Program run = Program.run("compute", "--c3d", study.file());
+
+        assertTrue(run.err().contains("S01/walk-1: computed"), run.err());
+        assertTrue(Program.run("compute", "--c3d", study.file()).err().contains("S01/walk-1: up to date"));
+        assertArrayEquals(input, Files.readAllBytes(study.walking(1)));
+        Capture measured = C3dReader.read(study.walking(1), Optional.empty());
+        Capture written = C3dReader.read(file, Optional.empty());
+        assertEquals(
+                measured.points().stream().map(PointSeries::label).toList(),
+                written.points().stream().map(PointSeries::label).toList());
+        assertEquals(measured.plates(), written.plates());
+        assertTrue(
+                written.findings().stream().anyMatch(finding -> finding.code().equals("points-computed")),
+                written.findings().toString());
     }
 
     @Test
