@@ -32,7 +32,20 @@ public final class JsonText {
     }
 
     /**
-     * What {@link #of} takes as part of a tree, from JSON that the program itself has made.
+     * JSON that the program itself has made, as a person likes to read it.
+     *
+     * @throws IllegalArgumentException if the text is no JSON
+     */
+    public static String of(String json) {
+        try {
+            return WRITER.writeValueAsString(MAPPER.readTree(json)) + "\n";
+        } catch (JsonProcessingException e) {
+            throw new IllegalArgumentException("no JSON: " + json, e);
+        }
+    }
+
+    /**
+     * What {@link #of(Map)} takes as part of a tree, from JSON that the program itself has made.
      *
      * @throws IllegalArgumentException if the text is no JSON
      */

@@ -5,6 +5,8 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Stream;
+import treadwork.io.file.JsonText;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.Severity;
 import treadwork.solver.run.TrialOutcome;
@@ -50,6 +52,16 @@ final class FindingLines {
         }
         err.println(trials.size() + " trials (" + String.join(", ", trials.subList(0, MOST_TRIALS))
                 + ", …), for example " + line(entries.get(0).finding()) + " The rest stand in the trials' trial.json.");
+    }
+
+    /** The change of the study file that would mend it, as lines to copy; empty where none is known. */
+    static List<String> change(Finding finding) {
+        return finding.proposal()
+                .map(proposal -> Stream.concat(
+                                Stream.of("in " + proposal.scope().place() + ":"),
+                                JsonText.of(proposal.json()).lines())
+                        .toList())
+                .orElse(List.of());
     }
 
     /** Severity, code and text: {@code warning plate-sign: ...}. */

@@ -3,6 +3,7 @@ package treadwork.solver.cli;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -14,21 +15,28 @@ import picocli.CommandLine.Spec;
 import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.file.JsonText;
+import treadwork.io.study.StudyReader;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
 import treadwork.model.study.TextSettings;
 import treadwork.solver.run.Inspection;
+import treadwork.solver.run.StudyInspection;
 
 /** {@code treadwork inspect}: what is in capture files, and what is wrong with them. */
 @Command(
         name = "inspect",
-        description = "Show what is in capture files, and what the checks find in them.",
+        description =
+                "Show what is in capture files, and what the checks find in them; of a study file, what is in its trials and"
+                        + " what does not agree.",
         mixinStandardHelpOptions = true)
 final class InspectCommand implements Callable<Integer> {
 
-    @Parameters(arity = "1..*", paramLabel = "FILE", description = "Capture files (C3D, or delimited text).")
+    @Parameters(
+            arity = "1..*",
+            paramLabel = "FILE",
+            description = "Capture files (C3D, or delimited text), or study files.")
     List<Path> files;
 
     @Option(names = "--json", description = "Print one JSON document.")
@@ -45,13 +53,17 @@ final class InspectCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        Map<Path, Inspection> inspected = new LinkedHashMap<>();
-        Map<Path, Finding> unusable = new LinkedHashMap<>();
+        Map<String, Inspection> inspected = new LinkedHashMap<>();
+        Map<String, Finding> unusable = new LinkedHashMap<>();
         for (Path file : files) {
             try {
-                inspected.put(file, Inspection.of(read(file)));
+                if (isStudy(file)) {
+                    inspectStudy(file, inspected, unusable);
+                } else {
+                    inspected.put(file.toString(), Inspection.of(read(file)));
+                }
             } catch (UnusableInputException refused) {
-                unusable.put(file, refused.finding());
+                unusable.put(file.toString(), refused.finding());
             }
         }
         print(inspected, unusable);
@@ -61,12 +73,23 @@ final class InspectCommand implements Callable<Integer> {
         return inspected.isEmpty() ? ExitCode.UNUSABLE : ExitCode.PARTLY;
     }
 
+    private static boolean isStudy(Path file) {
+        return file.toString().toLowerCase(Locale.ROOT).endsWith(".json");
+    }
+
+    private static void inspectStudy(Path file, Map<String, Inspection> inspected, Map<String, Finding> unusable) {
+        StudyInspection.each(StudyReader.read(file), trial -> {
+            trial.inspection().ifPresent(inspection -> inspected.put(trial.name(), inspection));
+            trial.refusal().ifPresent(refusal -> unusable.put(trial.name(), refusal));
+        });
+    }
+
     private Capture read(Path file) {
         ReadOptions options = new ReadOptions(Optional.ofNullable(unit), true);
         return CaptureFiles.read(file, Optional.empty(), options, TextSettings.DEFAULT);
     }
 
-    private void print(Map<Path, Inspection> inspected, Map<Path, Finding> unusable) {
+    private void print(Map<String, Inspection> inspected, Map<String, Finding> unusable) {
         if (json) {
             spec.commandLine()
                     .getOut()

@@ -1,6 +1,5 @@
 package treadwork.solver.cli;
 
-import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -19,7 +18,7 @@ final class InspectionJson {
 
     private InspectionJson() {}
 
-    static Map<String, Object> of(Map<Path, Inspection> inspected, Map<Path, Finding> unusable) {
+    static Map<String, Object> of(Map<String, Inspection> inspected, Map<String, Finding> unusable) {
         return Map.of(
                 "files",
                 Stream.concat(
@@ -28,17 +27,17 @@ final class InspectionJson {
                         .toList());
     }
 
-    private static Map<String, Object> refused(Path file, Finding finding) {
+    private static Map<String, Object> refused(String file, Finding finding) {
         Map<String, Object> tree = new LinkedHashMap<>();
-        tree.put("file", file.toString());
+        tree.put("file", file);
         tree.put("findings", FindingTree.of(List.of(finding)));
         return tree;
     }
 
-    private static Map<String, Object> file(Path file, Inspection inspection) {
+    private static Map<String, Object> file(String file, Inspection inspection) {
         Capture capture = inspection.capture();
         Map<String, Object> tree = new LinkedHashMap<>();
-        tree.put("file", file.toString());
+        tree.put("file", file);
         tree.put("firstFrame", capture.firstFrame());
         tree.put("frames", capture.frames());
         tree.put("pointRateHz", JsonText.number(capture.pointRate()));

@@ -1,14 +1,15 @@
 package treadwork.solver.cli;
 
-import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
 import treadwork.model.capture.AnalogChannel;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.Plate;
+import treadwork.model.finding.Finding;
 import treadwork.model.space.ScalarSeries;
 import treadwork.model.space.Vector3;
+import treadwork.model.space.VectorSeries;
 import treadwork.solver.run.Inspection;
 
 /** An inspection as text for a person. */
@@ -16,14 +17,15 @@ final class InspectionText {
 
     private static final String LEVELS = " ▁▂▃▄▅▆▇█";
     private static final int SPARK_WIDTH = 60;
+    private static final int MAP_WIDTH = 40;
     private static final int WIDTH = 100;
 
     private InspectionText() {}
 
-    static String of(Path file, Inspection inspection) {
+    static String of(String file, Inspection inspection) {
         Capture capture = inspection.capture();
         StringBuilder text = new StringBuilder();
-        line(text, file.toString());
+        line(text, "%s", file);
         line(
                 text,
                 "  %d frames, %d to %d, at %s Hz: %.2f s; %s; lengths in %s",
@@ -56,14 +58,15 @@ final class InspectionText {
                 text,
                 markers.size() + " points: ",
                 markers.stream().map(Inspection.MarkerSummary::label).toList());
-        TextTable table = new TextTable().words().numbers(3);
-        table.row("    points with gaps", "seen %", "gaps", "longest s");
+        TextTable table = new TextTable().words().words().numbers(3);
+        table.row("    points with gaps", "seen, over the record", "seen %", "gaps", "longest s");
         boolean any = false;
         for (Inspection.MarkerSummary marker : markers) {
             if (marker.seen() < frames) {
                 any = true;
                 table.row(
                         "    " + marker.label(),
+                        "|" + gapMap(marker.course()) + "|",
                         OutcomeTable.number("%.1f", 100.0 * marker.seen() / frames),
                         Integer.toString(marker.gaps()),
                         OutcomeTable.number("%.2f", marker.longestGapS()));
@@ -118,10 +121,25 @@ final class InspectionText {
         if (inspection.findings().isEmpty()) {
             line(text, "  nothing found wrong");
         }
-        inspection
-                .findings()
-                .forEach(finding ->
-                        text.append("  ").append(FindingLines.line(finding)).append(System.lineSeparator()));
+        for (Finding finding : inspection.findings()) {
+            line(text, "  %s", FindingLines.line(finding));
+            FindingLines.change(finding).forEach(changed -> line(text, "    %s", changed));
+        }
+    }
+
+    /** A block where the point is seen throughout a stretch of the record, a lighter one where in part, a dot where never. */
+    private static String gapMap(VectorSeries course) {
+        StringBuilder map = new StringBuilder();
+        for (int k = 0; k < MAP_WIDTH; k++) {
+            int from = (int) ((long) k * course.size() / MAP_WIDTH);
+            int to = Math.max(from + 1, (int) ((long) (k + 1) * course.size() / MAP_WIDTH));
+            int seen = 0;
+            for (int i = from; i < Math.min(to, course.size()); i++) {
+                seen += course.isGap(i) ? 0 : 1;
+            }
+            map.append(seen == 0 ? '·' : seen == to - from ? '█' : '▒');
+        }
+        return map.toString();
     }
 
     /** The greatest push in each of {@value #SPARK_WIDTH} equal stretches of the record, as blocks. */

@@ -7,6 +7,8 @@ import java.util.Locale;
 import java.util.Map;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.Severity;
+import treadwork.model.space.Vector3;
+import treadwork.model.space.VectorSeries;
 import treadwork.solver.marker.MarkerScreen.MarkerPlace;
 
 /**
@@ -38,7 +40,7 @@ final class SpikeSearch {
         for (int marker = 0; marker < sizes.length; marker++) {
             BitSet frames = new BitSet();
             for (int i = 0; i < sizes[marker].length; i++) {
-                frames.set(i, isSpike(sizes, marker, i));
+                frames.set(i, isSpike(sizes, marker, i) && isBack(cluster, marker, i));
             }
             if (!frames.isEmpty()) {
                 spikes.put(new MarkerPlace(cluster, marker), frames);
@@ -46,6 +48,24 @@ final class SpikeSearch {
             }
         }
         return spikes;
+    }
+
+    /** Whether the marker is where its cluster takes it one frame later; one that stays away has not jumped back. */
+    private static boolean isBack(MarkerCluster cluster, int marker, int frame) {
+        Vector3 own = Vector3.ZERO;
+        Vector3 others = Vector3.ZERO;
+        int known = 0;
+        for (int k = 0; k < cluster.size(); k++) {
+            VectorSeries course = cluster.courses().get(k);
+            Vector3 step = course.at(frame + 1).minus(course.at(frame - 1));
+            if (k == marker) {
+                own = step;
+            } else if (!step.isGap()) {
+                others = others.plus(step);
+                known++;
+            }
+        }
+        return known > 0 && own.minus(others.times(1.0 / known)).norm() < LIMIT;
     }
 
     private static boolean isSpike(double[][] sizes, int marker, int frame) {
@@ -72,9 +92,10 @@ final class SpikeSearch {
                 record.where(cluster, marker) + ", " + Frames.inWords(Frames.runs(frames, record.firstFrame())),
                 String.format(
                         Locale.ROOT,
-                        "it jumps by more than %.0f mm in %d frames and is back at once, its cluster does not",
+                        "it jumps by more than %.0f mm in %d frame%s and is back at once, its cluster does not",
                         1e3 * LIMIT,
-                        frames.cardinality()),
+                        frames.cardinality(),
+                        frames.cardinality() == 1 ? "" : "s"),
                 "A filter would spread each jump over its neighbours, so the marker is taken as missing there",
                 "Look at the marker in these frames where it was tracked; nothing else is needed");
     }

@@ -50,13 +50,14 @@ public record Inspection(
     }
 
     /**
+     * @param course      where it was seen
      * @param seen        frames in which it is known
      * @param gaps        stretches within the record in which it is not
      * @param longestGapS the longest of them, s
      */
-    public record MarkerSummary(String label, int seen, int gaps, double longestGapS) {}
+    public record MarkerSummary(String label, VectorSeries course, int seen, int gaps, double longestGapS) {}
 
-    /** Looks at a capture, with the settings that hold where a study file says nothing. */
+    /** Looks at a capture by itself, with the settings that hold where a study file says nothing. */
     public static Inspection of(Capture capture) {
         List<Finding> findings = new ArrayList<>(capture.findings());
         LabUp up = LabUp.find(capture, capture.plates(), Optional.empty());
@@ -67,18 +68,31 @@ public record Inspection(
             loads.addAll(resolved.plates());
             findings.addAll(resolved.findings());
         }
-        return new Inspection(capture, up.axis(), plates(capture, loads), markers(capture), findings);
+        return new Inspection(capture, up.axis(), plates(capture.plates(), loads), markers(capture), findings);
     }
 
-    private static List<PlateSummary> plates(Capture capture, List<PlateLoad> loads) {
+    /** Looks at a movement with all that its study says: all checks of plates, markers and body against each other, too. */
+    static Inspection of(TrialInput input) {
+        Measured measured = Measured.of(input);
+        Capture capture = input.movement();
+        List<Plate> described = input.trial().lab().plates().orElse(capture.plates());
+        return new Inspection(
+                capture,
+                Optional.of(measured.up()),
+                plates(described, measured.plates().plates()),
+                markers(capture),
+                measured.findings());
+    }
+
+    private static List<PlateSummary> plates(List<Plate> described, List<PlateLoad> loads) {
         List<PlateSummary> summaries = new ArrayList<>();
-        for (int i = 0; i < capture.plates().size(); i++) {
+        for (int i = 0; i < described.size(); i++) {
             int number = i + 1;
             Optional<ScalarSeries> push = loads.stream()
                     .filter(load -> load.number() == number)
                     .findFirst()
                     .map(PlateLoad::rawPush);
-            summaries.add(new PlateSummary(number, capture.plates().get(i), push));
+            summaries.add(new PlateSummary(number, described.get(i), push));
         }
         return summaries;
     }
@@ -107,7 +121,7 @@ public record Inspection(
             sinceSeen = 0;
             seen++;
         }
-        return new MarkerSummary(point.label(), seen, gaps, longest / rate);
+        return new MarkerSummary(point.label(), course, seen, gaps, longest / rate);
     }
 
     private static double greatest(ScalarSeries series) {

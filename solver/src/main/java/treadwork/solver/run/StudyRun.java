@@ -9,8 +9,6 @@ import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.function.Consumer;
-import treadwork.io.c3d.ReadOptions;
-import treadwork.io.capture.CaptureFiles;
 import treadwork.io.inertia.InertiaTables;
 import treadwork.io.result.InputFile;
 import treadwork.io.result.ResultCapture;
@@ -133,7 +131,7 @@ public final class StudyRun {
             return new TrialOutcome(
                     job.name(), trial.condition(), TrialOutcome.Status.UP_TO_DATE, folder, Optional.empty(), List.of());
         }
-        Capture movement = movement(trial);
+        Capture movement = new TrialCaptures(document).movement(trial);
         ComputedTrial computed = TrialComputation.compute(new TrialInput(
                 stood.capture(),
                 movement,
@@ -158,15 +156,5 @@ public final class StudyRun {
         inputs.add(InputFile.of(trial.file(), document.pathOf(trial.file())));
         trial.plateFile().ifPresent(plates -> inputs.add(InputFile.of(plates, document.pathOf(plates))));
         return inputs;
-    }
-
-    private Capture movement(Trial trial) {
-        ReadOptions options =
-                new ReadOptions(trial.lab().pointUnit(), trial.lab().plates().isEmpty());
-        return CaptureFiles.read(
-                document.pathOf(trial.file()),
-                trial.plateFile().map(document::pathOf),
-                options,
-                trial.lab().text());
     }
 }
