@@ -3,6 +3,7 @@ package treadwork.solver.plate;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.BitSet;
+import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.Optional;
 import treadwork.model.space.ScalarSeries;
@@ -33,6 +34,11 @@ record QuietLevel(double level, BitSet samples) {
 
     private static final double SURELY_LOUD = 10;
 
+    /** Beyond the noise neither is more than this part of all that the force ranges over: its unit may be another. */
+    private static final double QUIET_PART = 0.02;
+
+    private static final double LOUD_PART = 0.1;
+
     /** Of all samples may lie beyond an end: a plate rings when it is hit or left. */
     private static final double SHARE_BEYOND = 0.02;
 
@@ -44,16 +50,34 @@ record QuietLevel(double level, BitSet samples) {
         }
         double[] values = push.toArray();
         Windows windows = Windows.of(values, length);
-        double loudest = Math.min(SURELY_LOUD, Math.max(SURELY_QUIET, TIMES_NOISE * windows.quietestTenth()));
+        double range = range(values);
+        double scatter = TIMES_NOISE * windows.quietestTenth();
+        double quiet = Math.min(SURELY_QUIET, QUIET_PART * range);
+        double loud = Math.min(SURELY_LOUD, Math.max(scatter, LOUD_PART * range));
+        double loudest = Math.min(loud, Math.max(quiet, scatter));
+        double ringing = Math.max(loud, TIMES_NOISE * loudest);
         List<QuietLevel> levels = new ArrayList<>();
-        atEnd(values, windows, loudest, 1).ifPresent(levels::add);
-        atEnd(values, windows, loudest, -1)
+        atEnd(values, windows, new Noise(loudest, ringing), 1).ifPresent(levels::add);
+        atEnd(values, windows, new Noise(loudest, ringing), -1)
                 .filter(low -> levels.isEmpty() || !low.samples.intersects(levels.get(0).samples))
                 .ifPresent(levels::add);
         return levels;
     }
 
-    private static Optional<QuietLevel> atEnd(double[] values, Windows windows, double loudest, int end) {
+    /**
+     * @param loudest the greatest standard deviation of a quiet window, N
+     * @param ringing how far beyond a level samples do not count against it, N
+     */
+    private record Noise(double loudest, double ringing) {}
+
+    private static double range(double[] values) {
+        DoubleSummaryStatistics known =
+                Arrays.stream(values).filter(value -> !Double.isNaN(value)).summaryStatistics();
+        return known.getMax() - known.getMin();
+    }
+
+    private static Optional<QuietLevel> atEnd(double[] values, Windows windows, Noise noise, int end) {
+        double loudest = noise.loudest;
         double outermost = Double.NEGATIVE_INFINITY;
         for (int j = 0; j < windows.count(); j++) {
             if (windows.spread[j] <= loudest) {
@@ -71,7 +95,7 @@ record QuietLevel(double level, BitSet samples) {
         }
         withoutEnds(samples, windows.length);
         double level = samples.stream().mapToDouble(i -> values[i]).sum() / samples.cardinality();
-        double edge = end * level + Math.max(SURELY_LOUD, TIMES_NOISE * loudest);
+        double edge = end * level + noise.ringing;
         long beyond = Arrays.stream(values).filter(value -> end * value > edge).count();
         return beyond > SHARE_BEYOND * values.length ? Optional.empty() : Optional.of(new QuietLevel(level, samples));
     }
