@@ -13,6 +13,8 @@ import treadwork.model.capture.Capture;
 import treadwork.model.capture.Plate;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
+import treadwork.model.space.Vector3;
+import treadwork.model.space.VectorSeries;
 import treadwork.model.study.LabAxis;
 import treadwork.model.study.Orthosis;
 import treadwork.model.study.Subject;
@@ -28,6 +30,10 @@ import treadwork.solver.contact.FootOutline;
 import treadwork.solver.marker.Exchanges;
 import treadwork.solver.plate.LabUp;
 import treadwork.solver.plate.PlateLoads;
+import treadwork.solver.plausible.BodyCheck;
+import treadwork.solver.plausible.JointGapCheck;
+import treadwork.solver.plausible.SettingsCheck;
+import treadwork.solver.plausible.StandingStill;
 import treadwork.solver.pose.FootPoints;
 import treadwork.solver.pose.SegmentMotion;
 import treadwork.solver.pose.StandingBody;
@@ -80,7 +86,38 @@ record Measured(
                         tracked.findings(),
                         plates.findings(),
                         contacts.findings())));
-        return unchecked.with(Agreement.check(unchecked.scene(input, movement, described, feet)));
+        List<Finding> checks = new ArrayList<>(unchecked.plausibility(input, movement));
+        checks.addAll(Agreement.check(unchecked.scene(input, movement, described, feet)));
+        return unchecked.with(checks);
+    }
+
+    private List<Finding> plausibility(TrialInput input, Capture movement) {
+        Capture standing = input.standing();
+        List<VectorSeries> markers =
+                tracked.courses().values().stream().flatMap(List::stream).toList();
+        return together(List.of(
+                StandingStill.of(standing, input.subject().markerSet()),
+                BodyCheck.of(body, standing.name(), standing.pointUnit(), up.direction()),
+                SettingsCheck.of(
+                        movement, input.trial().processing(), !plates.plates().isEmpty(), markers),
+                JointGapCheck.of(movement.name(), body, tracked.motions())));
+    }
+
+    /** How fast the pelvis, or a foot where it is not tracked, gets on between the first and last frame that know it, m/s. */
+    double speed() {
+        SegmentMotion carrier = tracked.motions()
+                .getOrDefault(
+                        Segment.PELVIS, tracked.motions().values().iterator().next());
+        VectorSeries course = carrier.pose().toLab(Vector3.ZERO);
+        int first = 0;
+        int last = course.size() - 1;
+        while (first < last && course.isGap(first)) {
+            first++;
+        }
+        while (last > first && course.isGap(last)) {
+            last--;
+        }
+        return course.at(last).minus(course.at(first)).norm() * carrier.rate() / (last - first);
     }
 
     private Measured with(List<Finding> more) {

@@ -30,11 +30,16 @@ import treadwork.solver.pose.StandingBody;
 /**
  * The subject's segments in motion: gaps filled, markers smoothed, segments fitted to them.
  *
+ * @param courses   of each segment's markers, as recorded but for what is surely not their own place
  * @param motions   of every segment of the standing body
  * @param endFrames how many frames next to a gap or an end of the record have no sound acceleration, by segment
  * @param findings  what was filled, what stays blank
  */
-record TrackedBody(Map<Segment, SegmentMotion> motions, Map<Segment, Integer> endFrames, List<Finding> findings) {
+record TrackedBody(
+        Map<Segment, List<VectorSeries>> courses,
+        Map<Segment, SegmentMotion> motions,
+        Map<Segment, Integer> endFrames,
+        List<Finding> findings) {
 
     TrackedBody {
         motions = Collections.unmodifiableMap(new EnumMap<>(motions));
@@ -60,7 +65,7 @@ record TrackedBody(Map<Segment, SegmentMotion> motions, Map<Segment, Integer> en
             endFrames.put(segment, endFrames(smoothed, movement.pointRate()));
         }
         ends(movement, endFrames).ifPresent(findings::add);
-        return new TrackedBody(motions, endFrames, findings);
+        return new TrackedBody(screen.courses(), motions, endFrames, findings);
     }
 
     private static MarkerScreen screened(Capture movement, Trial trial, StandingBody body) {

@@ -3,10 +3,12 @@ package treadwork.solver.run;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import treadwork.model.body.MassProperties;
 import treadwork.model.body.Segment;
 import treadwork.model.body.SegmentKind;
 import treadwork.model.capture.Capture;
+import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
 import treadwork.model.load.JointLoads;
 import treadwork.model.load.SegmentSheet;
@@ -15,6 +17,7 @@ import treadwork.model.space.Inertia;
 import treadwork.model.space.Vector3;
 import treadwork.solver.anthropometry.WeighedSegment;
 import treadwork.solver.dynamics.Convention;
+import treadwork.solver.plausible.RangeCheck;
 import treadwork.solver.pose.StandingBody;
 
 /** The main job in memory: from a standing and a movement capture to the loads of every frame. */
@@ -43,6 +46,7 @@ public final class TrialComputation {
                         measured.body(), measured.tracked(), measured.masses(), measured.up())
                 .solve(measured.contacts().loads());
 
+        TrialSummary summary = TrialSummary.of(joints, input.subject().massKg());
         TrialResult result = new TrialResult(
                 movement.firstFrame(),
                 movement.frames(),
@@ -52,13 +56,30 @@ public final class TrialComputation {
                 measured.contacts().support(),
                 measured.contacts().contacts(),
                 sheets(measured.body(), measured.tracked(), measured.masses()),
-                measured.findings());
+                Stream.concat(measured.findings().stream(), ranges(summary, measured, movement).stream())
+                        .toList());
         return new ComputedTrial(
                 Cropping.to(input.trial().frames(), result, movement.name()),
                 joints.stream()
                         .collect(Collectors.toMap(
                                 SolvedJoint::joint, solved -> solved.load().point())),
-                TrialSummary.of(joints, input.subject().massKg()));
+                summary);
+    }
+
+    private static List<Finding> ranges(TrialSummary summary, Measured measured, Capture movement) {
+        List<RangeCheck.Peaks> sides = summary.sides().entrySet().stream()
+                .map(entry -> {
+                    TrialSummary.Peaks peaks = entry.getValue();
+                    return new RangeCheck.Peaks(
+                            entry.getKey(),
+                            peaks.plantarflexor(),
+                            peaks.kneeExtensor(),
+                            peaks.hipExtensor(),
+                            peaks.hipAbductor(),
+                            peaks.anklePower());
+                })
+                .toList();
+        return RangeCheck.of(movement.name(), measured.speed(), sides);
     }
 
     private static List<JointLoads> loads(List<SolvedJoint> joints, TrialInput input) {

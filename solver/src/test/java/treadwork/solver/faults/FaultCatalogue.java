@@ -10,12 +10,15 @@ import treadwork.fixtures.fault.PlateFaults;
 import treadwork.fixtures.fault.SetupFaults;
 import treadwork.fixtures.walker.Disturbance;
 import treadwork.fixtures.walker.WalkerSettings;
+import treadwork.model.body.Landmark;
 import treadwork.model.body.Segment;
 import treadwork.model.body.SegmentKind;
 import treadwork.model.body.Side;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.FrameRange;
 import treadwork.model.space.Vector3;
+import treadwork.model.study.FilterSettings;
+import treadwork.model.study.Processing;
 
 /** The mistakes that are planted, in the sizes that are swept; in the middle of the walk, where all is measured. */
 final class FaultCatalogue {
@@ -30,6 +33,8 @@ final class FaultCatalogue {
         faults.addAll(description());
         faults.addAll(channels());
         faults.addAll(markers());
+        faults.addAll(body());
+        faults.addAll(settings());
         return faults;
     }
 
@@ -174,6 +179,70 @@ final class FaultCatalogue {
                 return walk.withStanding(
                         MarkerFaults.displaced(walk.standing(), anyMarker(walk), slip.times(1e-3 * mm)));
             }));
+        }
+        return faults;
+    }
+
+    private static List<PlantedFault> body() {
+        List<PlantedFault> faults = new ArrayList<>();
+        for (int mm : new int[] {15, 30, 50}) {
+            faults.add(made(
+                    "static-moving",
+                    "standing person sways by " + mm + " mm",
+                    mm == 30,
+                    walk -> walk.withStanding(
+                            MarkerFaults.swaying(walk.standing(), new Vector3(0.8, 0.6, 0).times(1e-3 * mm)))));
+        }
+        faults.add(made(
+                "unit-mismatch",
+                "lengths ten times too large",
+                true,
+                walk -> walk.withStanding(MarkerFaults.scaled(walk.standing(), 10))
+                        .withWalking(MarkerFaults.scaled(walk.walking(), 10))));
+        faults.add(made(
+                "landmark-side",
+                "left and right labels exchanged",
+                true,
+                walk -> walk.withMarkerSet(MarkerFaults.sidesExchanged(walk.standingSet()))));
+        faults.add(made(
+                "landmark-order",
+                "inner and outer epicondyle exchanged",
+                true,
+                walk -> walk.withMarkerSet(MarkerFaults.landmarksExchanged(
+                        walk.standingSet(), Landmark.RIGHT_LATERAL_EPICONDYLE, Landmark.RIGHT_MEDIAL_EPICONDYLE))));
+        for (int mm : new int[] {50, 100}) {
+            faults.add(made("joint-gap", "shank markers moved by " + mm + " mm", mm == 100, walk -> {
+                Capture moved = walk.standing();
+                for (String label : walk.standingSet().clusters().get(Segment.RIGHT_SHANK)) {
+                    moved = MarkerFaults.displaced(moved, label, new Vector3(0, 0, 1e-3 * mm));
+                }
+                return walk.withStanding(moved);
+            }));
+        }
+        faults.add(onPlate(
+                "out-of-range",
+                "forces and moments twice too large",
+                (capture, plate) -> PlateFaults.momentsScaled(PlateFaults.forcesScaled(capture, plate, 2), plate, 2)));
+        return faults;
+    }
+
+    private static List<PlantedFault> settings() {
+        List<PlantedFault> faults = new ArrayList<>();
+        for (int hz : new int[] {10, 50}) {
+            faults.add(made("filter-unlike", "plates at " + hz + " Hz, markers at 6 Hz", true, walk -> {
+                Processing like = walk.processing();
+                FilterSettings plates = new FilterSettings(FilterSettings.Kind.BUTTERWORTH, hz, 4);
+                return walk.withProcessing(new Processing(
+                        like.markerFilter(), plates, like.longestGapS(), like.contactThresholdN(), like.plateZero()));
+            }));
+        }
+        for (int hz : new int[] {60, 40, 30}) {
+            faults.add(new PlantedFault(
+                    "rate-low",
+                    "recorded at " + hz + " Hz",
+                    hz == 40,
+                    settings -> settings.with(settings.gait().withPointRate(hz)),
+                    UnaryOperator.identity()));
         }
         return faults;
     }
