@@ -15,7 +15,7 @@ import treadwork.model.study.MarkerSet;
 public final class StandingStill {
 
     /** Adults who stand quietly sway by some 10 mm at the hips within half a minute (from memory), m. */
-    private static final double LIMIT = 0.02;
+    private static final double LIMIT = 0.012;
 
     /** Of the known frames may be beyond that. */
     private static final double SHARE = 0.05;
