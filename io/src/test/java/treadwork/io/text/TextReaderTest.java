@@ -14,9 +14,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import treadwork.model.capture.Capture;
-import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
+import treadwork.model.study.LabSettings;
 import treadwork.model.study.TextSettings;
 
 /** Small invented texts; every expected position is what stands in the text, in metres. */
@@ -100,6 +100,55 @@ class TextReaderTest {
         assertEquals(120, read(text).pointRate());
     }
 
+    /** A label that could be a moment's, at 100 mm from another marker, over 1 m. */
+    @Test
+    void aMarkerThatIsCarriedAlongIsNoChannelWhateverItsLabel() {
+        Capture capture = read(walk("M1", 100, 0));
+
+        assertEquals(
+                List.of("A", "M1"),
+                capture.points().stream().map(point -> point.label()).toList());
+        assertEquals(0, capture.samplesPerFrame());
+        assertTrue(codes(capture).contains("text-markers"));
+    }
+
+    @Test
+    void aForceThatLooksLikeAPositionIsAChannel() {
+        Capture capture = read(walk("F1", 0, 700));
+
+        assertEquals(1, capture.points().size());
+        assertEquals("F1_x", capture.analog().get(0).label());
+        assertTrue(codes(capture).contains("text-channels"));
+    }
+
+    @Test
+    void whereTheChannelsAreNamedEveryOtherTripleIsAMarker() {
+        TextSettings settings = new TextSettings(Optional.empty(), Optional.empty(), List.of("A_x"));
+
+        Capture capture = read(bytes(walk("F1", 0, 700)), settings);
+
+        assertEquals("F1", capture.points().get(0).label());
+    }
+
+    @Test
+    void ofAStandingCaptureEveryTripleIsAMarker() {
+        Capture capture = TextReader.markers(TextFile.of("s.csv", bytes(walk("T1", 0, 0))), LabSettings.DEFAULT);
+
+        assertEquals(2, capture.points().size());
+        assertEquals(0, capture.analog().size());
+    }
+
+    /** A marker that goes 1 m, and three columns that keep an offset from it or pulse on their own, both in mm. */
+    private static String walk(String label, double offset, double pulse) {
+        StringBuilder text = new StringBuilder("time,A_x,A_y,A_z,L_x,L_y,L_z\n".replace("L", label));
+        for (int i = 0; i < 101; i++) {
+            double x = 500 + 10 * i;
+            double own = pulse > 0 ? 20 : x + offset;
+            text.append(i / 100.0 + "," + x + ",2,900," + own + ",30," + (880 - pulse * Math.sin(i / 32.0)) + "\n");
+        }
+        return text.toString();
+    }
+
     @Test
     void namedChannelsStandInTheirOrder() {
         TextSettings settings = new TextSettings(Optional.empty(), Optional.empty(), List.of("b", "a"));
@@ -120,8 +169,7 @@ class TextReaderTest {
         Capture capture = TextReader.read(
                 TextFile.of("points.csv", bytes(PLAIN)),
                 Optional.of(TextFile.of("plates.csv", bytes(plates.toString()))),
-                Optional.of(LengthUnit.MM),
-                TextSettings.DEFAULT);
+                lab(TextSettings.DEFAULT));
 
         assertEquals(2, capture.frames());
         assertEquals(4, capture.samplesPerFrame());
@@ -233,6 +281,10 @@ class TextReaderTest {
     }
 
     private static Capture read(byte[] bytes, TextSettings settings) {
-        return TextReader.read(TextFile.of("bad.csv", bytes), Optional.empty(), Optional.empty(), settings);
+        return TextReader.read(TextFile.of("bad.csv", bytes), Optional.empty(), lab(settings));
+    }
+
+    private static LabSettings lab(TextSettings settings) {
+        return new LabSettings(Optional.empty(), Optional.empty(), Optional.empty(), settings, List.of());
     }
 }

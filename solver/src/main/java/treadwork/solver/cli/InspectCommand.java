@@ -11,14 +11,12 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
-import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.file.JsonText;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
-import treadwork.model.study.TextSettings;
 import treadwork.solver.run.Inspection;
 
 /** {@code treadwork inspect}: what is in capture files, and what is wrong with them. */
@@ -62,8 +60,7 @@ final class InspectCommand implements Callable<Integer> {
     }
 
     private Capture read(Path file) {
-        ReadOptions options = new ReadOptions(Optional.ofNullable(unit), true);
-        return CaptureFiles.read(file, Optional.empty(), options, TextSettings.DEFAULT);
+        return CaptureFiles.read(file, Optional.ofNullable(unit));
     }
 
     private void print(Map<Path, Inspection> inspected, Map<Path, Finding> unusable) {

@@ -1,10 +1,8 @@
 package treadwork.solver.run;
 
 import java.util.Map;
-import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.atomic.AtomicInteger;
-import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.result.InputFile;
 import treadwork.io.study.StudyDocument;
@@ -47,11 +45,7 @@ final class StandingCaptures {
 
     private Standing read(Subject subject, Trial trial) {
         InputFile input = InputFile.of(subject.staticFile(), document.pathOf(subject.staticFile()));
-        Capture capture = CaptureFiles.read(
-                document.pathOf(subject.staticFile()),
-                Optional.empty(),
-                new ReadOptions(trial.lab().pointUnit(), false),
-                trial.lab().text());
+        Capture capture = CaptureFiles.standing(document.pathOf(subject.staticFile()), trial.lab());
         return new Standing(capture, input);
     }
 }

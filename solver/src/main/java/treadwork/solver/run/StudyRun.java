@@ -9,7 +9,6 @@ import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.function.Consumer;
-import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.inertia.InertiaTables;
 import treadwork.io.result.InputFile;
@@ -156,12 +155,7 @@ public final class StudyRun {
     }
 
     private Capture movement(Trial trial) {
-        ReadOptions options =
-                new ReadOptions(trial.lab().pointUnit(), trial.lab().plates().isEmpty());
-        return CaptureFiles.read(
-                document.pathOf(trial.file()),
-                trial.plateFile().map(document::pathOf),
-                options,
-                trial.lab().text());
+        return CaptureFiles.movement(
+                document.pathOf(trial.file()), trial.plateFile().map(document::pathOf), trial.lab());
     }
 }
