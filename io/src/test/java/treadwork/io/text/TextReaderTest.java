@@ -94,6 +94,29 @@ class TextReaderTest {
     }
 
     @Test
+    void aQuotedCellMayHoldTheDelimiter() {
+        assertPlain(
+                read(
+                        "time,A_x,A_y,A_z,Fz1\n\"0\",\"1000,5\",\"2\",\"3\",\"7\"\n\"0,01\",\"1001,5\",2,3,8\n\"0,02\",0,0,0,9\n"));
+    }
+
+    @Test
+    void lettersAfterManyNumbersTellTheEncodingToo() {
+        StringBuilder text = new StringBuilder("time,A_x,A_y,A_z,Fz1\n");
+        for (int i = 0; i < 10_000; i++) {
+            text.append(i / 100.0).append(",1500,2,3,7\n");
+        }
+        byte[] bytes = text.append("100,1500,2,3,\u00e9").toString().getBytes(StandardCharsets.ISO_8859_1);
+
+        UnusableInputException refused =
+                assertThrows(UnusableInputException.class, () -> read(bytes, TextSettings.DEFAULT));
+
+        assertTrue(
+                refused.finding().line().contains("line 10002, column 5 \"Fz1\": \"\u00e9\""),
+                refused.finding().line());
+    }
+
+    @Test
     void aStatedRateGoesBeforeACountOfRows() {
         String text = "rate: 120 Hz\nTime,A_x,A_y,A_z\n1,1500,2,3\n2,1500,2,3\n3,1500,2,3\n";
 
@@ -189,6 +212,8 @@ class TextReaderTest {
                 "text-cell | `t,A_x,A_y,A_z#0,1,2,3#1,1,two,3` | line 3, column 3 \"A_y\"",
                 "text-cell | `t;A_x;A_y;A_z#0;1,5;2;3#1;1,5;2,5;3#2;1.5;2;3` | line 4, column 2",
                 "text-time-uneven | `t,A_x,A_y,A_z#0,1,2,3#0.1,1,2,3#0.2,1,2,3#0.4,1,2,3` | line 5",
+                "text-time-uneven | `t,A_x,A_y,A_z#0,1,2,3##0.1,1,2,3##0.2,1,2,3#0.4,1,2,3` | line 7",
+                "text-ragged | `t,A_x,A_y,A_z#0,1,2,3##1,1,2` | line 4",
                 "text-rate | `time,A_x,A_y,A_z#1,1,2,3#2,1,2,3#3,1,2,3` | only counts the rows",
                 "text-rate | `A_x,A_y,A_z#1,2,3#1,2,3` | neither a time column",
                 "text-column-twice | `t,A_x,A_x,A_z#0,1,2,3#1,1,2,3` | column 3",
@@ -221,6 +246,8 @@ class TextReaderTest {
                 Numbers numbers = new Numbers(bytes(text), '.');
 
                 assertEquals(Double.parseDouble(text), numbers.parse(0, text.length()), text);
+                double plain = numbers.plain(0, text.length(), (byte) ',');
+                assertEquals(numbers.next() < 0 ? Double.NaN : Double.parseDouble(text), plain, text);
             }
         }
     }
