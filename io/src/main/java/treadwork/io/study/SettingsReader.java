@@ -28,6 +28,7 @@ import treadwork.model.study.LabAxis;
 import treadwork.model.study.LabSettings;
 import treadwork.model.study.MomentAxes;
 import treadwork.model.study.MomentConvention;
+import treadwork.model.study.NamedPlate;
 import treadwork.model.study.Normalisation;
 import treadwork.model.study.Orthosis;
 import treadwork.model.study.PlateZero;
@@ -43,13 +44,45 @@ final class SettingsReader {
     private SettingsReader() {}
 
     static LabSettings lab(JsonNode lab) {
+        JsonNode plates = lab.path("plates");
+        boolean named = areNamed(plates);
         return new LabSettings(
                 LabAxis.ofKey(lab.path("up").asText()),
                 LengthUnit.ofSymbol(lab.path("pointUnit").asText()),
-                lab.path("plates").isArray()
-                        ? Optional.of(each(lab.get("plates"), SettingsReader::plate))
-                        : Optional.empty(),
-                text(lab.path("text")));
+                plates.isArray() && !named ? Optional.of(each(plates, SettingsReader::plate)) : Optional.empty(),
+                text(lab.path("text")),
+                named ? each(plates, SettingsReader::namedPlate) : List.of());
+    }
+
+    /** Whether any plate has a channel by its name, or must have. */
+    static boolean areNamed(JsonNode plates) {
+        for (JsonNode plate : plates) {
+            if (inLabAxes(plate)) {
+                return true;
+            }
+            for (JsonNode channel : plate.path("channels")) {
+                if (channel.isTextual()) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    /** Whether forces and centre of pressure of a plate are along the lab's axes. */
+    static boolean inLabAxes(JsonNode plate) {
+        return plate.path("axes").asText().equals("lab");
+    }
+
+    private static NamedPlate namedPlate(JsonNode plate) {
+        return new NamedPlate(
+                type(plate),
+                inLabAxes(plate),
+                each(plate.get("cornersM"), SettingsReader::vector),
+                plate.has("originM") ? vector(plate.get("originM")) : Vector3.ZERO,
+                each(plate.get("channels"), name -> name.textValue().strip()),
+                calibration(plate),
+                channelUnit(plate));
     }
 
     private static TextSettings text(JsonNode text) {
@@ -156,20 +189,31 @@ final class SettingsReader {
     }
 
     private static Plate plate(JsonNode plate) {
-        Optional<CalibrationMatrix> calibration = Optional.empty();
-        if (plate.has("calibration")) {
-            List<Double> elements = new ArrayList<>();
-            plate.get("calibration").forEach(row -> row.forEach(element -> elements.add(element.asDouble())));
-            calibration = Optional.of(CalibrationMatrix.ofRows(
-                    elements.stream().mapToDouble(Double::doubleValue).toArray()));
-        }
         return new Plate(
-                PlateType.ofCode(plate.get("type").asInt()).orElseThrow(),
+                type(plate),
                 each(plate.get("cornersM"), SettingsReader::vector),
                 vector(plate.get("originM")),
                 each(plate.get("channels"), number -> number.asInt() - 1),
-                calibration,
-                LengthUnit.ofSymbol(plate.path("channelUnit").asText()).orElse(LengthUnit.MM));
+                calibration(plate),
+                channelUnit(plate));
+    }
+
+    private static PlateType type(JsonNode plate) {
+        return PlateType.ofCode(plate.get("type").asInt()).orElseThrow();
+    }
+
+    private static LengthUnit channelUnit(JsonNode plate) {
+        return LengthUnit.ofSymbol(plate.path("channelUnit").asText()).orElse(LengthUnit.MM);
+    }
+
+    private static Optional<CalibrationMatrix> calibration(JsonNode plate) {
+        if (!plate.has("calibration")) {
+            return Optional.empty();
+        }
+        List<Double> elements = new ArrayList<>();
+        plate.get("calibration").forEach(row -> row.forEach(element -> elements.add(element.asDouble())));
+        return Optional.of(CalibrationMatrix.ofRows(
+                elements.stream().mapToDouble(Double::doubleValue).toArray()));
     }
 
     private static MassProperties massProperties(JsonNode given) {

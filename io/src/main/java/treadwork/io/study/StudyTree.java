@@ -22,6 +22,7 @@ import treadwork.model.study.FilterSettings;
 import treadwork.model.study.LabAxis;
 import treadwork.model.study.LabSettings;
 import treadwork.model.study.MarkerSet;
+import treadwork.model.study.NamedPlate;
 import treadwork.model.study.Orthosis;
 import treadwork.model.study.PlateZero;
 import treadwork.model.study.Processing;
@@ -42,11 +43,10 @@ public final class StudyTree {
         Map<String, Object> tree = new LinkedHashMap<>();
         tree.put("up", lab.up().map(LabAxis::key).orElse(AUTO));
         tree.put("pointUnit", lab.pointUnit().map(LengthUnit::symbol).orElse(AUTO));
+        Object plates = lab.namedPlates().isEmpty() ? "file" : each(lab.namedPlates(), StudyTree::plate);
         tree.put(
                 "plates",
-                lab.plates()
-                        .<Object>map(plates -> each(plates, StudyTree::plate))
-                        .orElse("file"));
+                lab.plates().<Object>map(given -> each(given, StudyTree::plate)).orElse(plates));
         tree.put("text", text(lab.text()));
         return tree;
     }
@@ -155,6 +155,18 @@ public final class StudyTree {
         tree.put("cornersM", each(plate.corners(), StudyTree::vector));
         tree.put("originM", vector(plate.origin()));
         tree.put("channels", each(plate.channels(), place -> place + 1));
+        tree.put("channelUnit", plate.channelUnit().symbol());
+        plate.calibration().ifPresent(matrix -> tree.put("calibration", rows(matrix)));
+        return tree;
+    }
+
+    private static Map<String, Object> plate(NamedPlate plate) {
+        Map<String, Object> tree = new LinkedHashMap<>();
+        tree.put("type", plate.type().code());
+        tree.put("axes", plate.labAxes() ? "lab" : "plate");
+        tree.put("cornersM", each(plate.corners(), StudyTree::vector));
+        tree.put("originM", vector(plate.origin()));
+        tree.put("channels", plate.channels());
         tree.put("channelUnit", plate.channelUnit().symbol());
         plate.calibration().ifPresent(matrix -> tree.put("calibration", rows(matrix)));
         return tree;

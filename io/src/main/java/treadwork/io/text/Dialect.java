@@ -20,7 +20,7 @@ record Dialect(char delimiter, char decimal, int data, int line, int columns) {
         Dialect best = null;
         for (char delimiter : new char[] {'\t', ';', ','}) {
             for (char decimal : new char[] {'.', ','}) {
-                Dialect found = delimiter == decimal ? null : first(source, delimiter, decimal);
+                Dialect found = first(source, delimiter, decimal);
                 if (found != null && (best == null || found.isBefore(best))) {
                     best = found;
                 }
@@ -64,15 +64,14 @@ record Dialect(char delimiter, char decimal, int data, int line, int columns) {
         int cells = 0;
         int known = 0;
         int from = start;
-        for (int at = start; at <= end; at++) {
-            if (at == end || source.bytes[at] == delimiter) {
-                known += Double.isNaN(numbers.parse(from, at)) ? 0 : 1;
-                if (!numbers.valid()) {
-                    return 0;
-                }
-                cells++;
-                from = at + 1;
+        while (from <= end) {
+            int at = source.endOfCell(from, end, (byte) delimiter);
+            known += Double.isNaN(numbers.parse(from, at)) ? 0 : 1;
+            if (!numbers.valid()) {
+                return 0;
             }
+            cells++;
+            from = at + 1;
         }
         return known > 0 ? cells : 0;
     }
@@ -83,11 +82,10 @@ record Dialect(char delimiter, char decimal, int data, int line, int columns) {
         int end = source.endOfLine(start);
         int known = 0;
         int from = start;
-        for (int at = start; at <= end; at++) {
-            if (at == end || source.bytes[at] == delimiter) {
-                known += Double.isNaN(numbers.parse(from, at)) ? 0 : 1;
-                from = at + 1;
-            }
+        while (from <= end) {
+            int at = source.endOfCell(from, end, (byte) delimiter);
+            known += Double.isNaN(numbers.parse(from, at)) ? 0 : 1;
+            from = at + 1;
         }
         return 2 * known >= columns;
     }

@@ -10,10 +10,12 @@ final class Numbers {
 
     private static final long EXACT = 1L << 53;
     private static final int LONGEST = 400;
+    private static final int MOST_DIGITS = 15;
 
     private final byte[] bytes;
     private final byte decimal;
     private boolean valid;
+    private int next;
 
     static {
         TEN[0] = 1;
@@ -30,6 +32,49 @@ final class Numbers {
     /** Whether the last cell was a number or a gap. */
     boolean valid() {
         return valid;
+    }
+
+    /**
+     * The number that begins at {@code from}, if it is plain (sign, up to 15 digits, one decimal sign) and ends with
+     * {@code delimiter} or at {@code end}; then {@link #next} is where it ends, else -1. Fifteen digits and a power of ten
+     * up to 10²² are both exact, so one division rounds as it must.
+     */
+    double plain(int from, int end, byte delimiter) {
+        byte[] text = bytes;
+        int at = from;
+        boolean negative = at < end && text[at] == '-';
+        at += negative ? 1 : 0;
+        int first = at;
+        long digits = 0;
+        int digit;
+        while (at < end && (digit = text[at] - '0') >= 0 && digit <= 9) {
+            digits = digits * 10 + digit;
+            at++;
+        }
+        int count = at - first;
+        int decimals = 0;
+        if (at < end && text[at] == decimal && decimal != delimiter) {
+            int point = ++at;
+            while (at < end && (digit = text[at] - '0') >= 0 && digit <= 9) {
+                digits = digits * 10 + digit;
+                at++;
+            }
+            decimals = at - point;
+            count += decimals;
+        }
+        boolean ended = at == end || text[at] == delimiter;
+        if (!ended || count == 0 || count > MOST_DIGITS) {
+            next = -1;
+            return Double.NaN;
+        }
+        next = at;
+        double value = digits / TEN[decimals];
+        return negative ? -value : value;
+    }
+
+    /** Where the last plain number ended; -1 if it was not plain. */
+    int next() {
+        return next;
     }
 
     /** The number between two places; NaN for a gap (empty, NaN, NA, -), and for what is no number. */

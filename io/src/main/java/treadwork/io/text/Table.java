@@ -15,7 +15,7 @@ final class Table {
         this.source = source;
         this.dialect = Dialect.of(source);
         this.header = Header.of(source, dialect);
-        this.columns = new double[dialect.columns()][16];
+        this.columns = new double[dialect.columns()][mostRows()];
         fill();
     }
 
@@ -32,9 +32,24 @@ final class Table {
         return columns[column];
     }
 
-    /** The file's line of a row, if no line between the rows is blank. */
+    /** The file's line of a row, counted again since lines between the rows may be blank. */
     int line(int row) {
-        return dialect.line() + row;
+        int line = dialect.line();
+        int at = dialect.data();
+        for (int left = row; at < source.bytes.length; line++) {
+            if (source.endOfLine(at) > at && left-- == 0) {
+                return line;
+            }
+            at = source.nextLine(at);
+        }
+        return line;
+    }
+
+    /** No more rows than lines, and none with fewer bytes than delimiters: so memory is allotted once, and not in vain. */
+    private int mostRows() {
+        int bytes = source.bytes.length - dialect.data();
+        int shortest = Math.max(1, dialect.columns() - 1);
+        return Math.min(source.lines - dialect.line() + 1, bytes / shortest + 1);
     }
 
     private void fill() {
@@ -47,42 +62,44 @@ final class Table {
             }
             at = source.nextLine(at);
         }
-        for (int i = 0; i < columns.length; i++) {
+        for (int i = 0; i < columns.length && rows < columns[i].length; i++) {
             columns[i] = Arrays.copyOf(columns[i], rows);
         }
     }
 
     private void row(Numbers numbers, int start, int end, int line) {
-        if (rows == columns[0].length) {
-            for (int i = 0; i < columns.length; i++) {
-                columns[i] = Arrays.copyOf(columns[i], rows * 2);
-            }
-        }
-        byte[] bytes = source.bytes;
         byte delimiter = (byte) dialect.delimiter();
         int cell = 0;
         int from = start;
-        for (int at = start; at <= end; at++) {
-            if (at < end && bytes[at] != delimiter) {
-                continue;
-            }
-            if (cell < columns.length) {
-                columns[cell][rows] = numbers.parse(from, at);
-                if (!numbers.valid()) {
+        while (from <= end) {
+            double value = numbers.plain(from, end, delimiter);
+            int at = numbers.next();
+            if (at < 0) {
+                at = source.endOfCell(from, end, delimiter);
+                value = numbers.parse(from, at);
+                if (!numbers.valid() && cell < columns.length) {
                     throw cell(line, cell, from, at);
                 }
+            }
+            if (cell < columns.length) {
+                columns[cell][rows] = value;
             } else if (at > from) {
                 throw ragged(line, cell + 1);
             }
             cell++;
             from = at + 1;
         }
-        if (cell < columns.length - 1
-                || (cell == columns.length - 1 && !header.names().get(cell).isEmpty())) {
-            throw ragged(line, cell);
+        endOfRow(cell, line);
+    }
+
+    /** A last column without a name may be missing. */
+    private void endOfRow(int cells, int line) {
+        int last = columns.length - 1;
+        if (cells < last || (cells == last && !header.names().get(last).isEmpty())) {
+            throw ragged(line, cells);
         }
-        if (cell == columns.length - 1) {
-            columns[cell][rows] = Double.NaN;
+        if (cells == last) {
+            columns[last][rows] = Double.NaN;
         }
         rows++;
     }

@@ -20,7 +20,7 @@ import treadwork.io.study.StudyReader;
 import treadwork.io.text.TextFile;
 import treadwork.io.text.TextReader;
 import treadwork.model.capture.Capture;
-import treadwork.model.study.TextSettings;
+import treadwork.model.study.LabSettings;
 
 /** The readers of the program. */
 final class Targets {
@@ -144,8 +144,7 @@ final class Targets {
 
         @Override
         public String read(byte[] input) {
-            return Results.kind(TextReader.read(
-                    TextFile.of("fuzz.txt", input), Optional.empty(), Optional.empty(), TextSettings.DEFAULT));
+            return Results.kind(TextReader.read(TextFile.of("fuzz.txt", input), Optional.empty(), LabSettings.DEFAULT));
         }
     }
 

@@ -338,6 +338,42 @@ class StudyFaultTest {
     }
 
     @Test
+    void aPlateOfTypeTwoInLabAxes() {
+        study.with("\"up\": \"+z\"", plate(2, ", \"axes\": \"lab\""));
+
+        assertFault("study-value", "lab.plates[0].axes", "type 2 cannot be stated in lab axes");
+    }
+
+    @Test
+    void aPlateInLabAxesWithoutItsSevenChannels() {
+        study.with("\"up\": \"+z\"", plate(1, ", \"axes\": \"lab\""));
+
+        assertFault("study-value", "lab.plates[0].channels", "type 1 in lab axes has 7 channels, not 6");
+    }
+
+    @Test
+    void aPlateInLabAxesWithChannelNumbers() {
+        String plate = plate(1, ", \"axes\": \"lab\"").replace("5,6]", "5,6,7]");
+        study.with("\"up\": \"+z\"", plate);
+
+        assertFault("study-value", "lab.plates[0].channels[0]", "by its number");
+    }
+
+    @Test
+    void channelNumbersAndNamesMixed() {
+        study.with("\"up\": \"+z\"", plate(2, "").replace("5,6]", "5,\"Mz\"]"));
+
+        assertFault("study-value", "lab.plates[0].channels[0]", "by its number");
+    }
+
+    @Test
+    void aPlateWithoutItsOrigin() {
+        study.with("\"up\": \"+z\"", plate(2, "").replace("\"originM\": [0,0,0], ", ""));
+
+        assertFault("study-key-missing", "lab.plates[0]", "\"originM\"");
+    }
+
+    @Test
     void anAbsolutePath() {
         study.with("\"S01/standing.c3d\"", "\"/S01/standing.c3d\"");
 

@@ -11,15 +11,23 @@ import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import treadwork.model.capture.LengthUnit;
 import treadwork.model.study.LabAxis;
 import treadwork.model.study.LabSettings;
+import treadwork.model.study.NamedPlate;
 import treadwork.model.study.Study;
 import treadwork.model.study.Subject;
+import treadwork.model.study.TextSettings;
 import treadwork.model.study.Trial;
 
 class StudyWriterTest {
 
     private static final String FIRST_TRIAL = "\"condition\": \"brace off\"";
+
+    private static final String NAMED_PLATES = "\"text\": { \"pointRateHz\": 150, \"plateRateHz\": 450, "
+            + "\"channels\": [\"u\", \"v\"] }, \"plates\": [ { \"type\": 1, \"axes\": \"lab\", "
+            + "\"cornersM\": [[0.4,0.6,0],[0,0.6,0],[0,0,0],[0.4,0,0]], "
+            + "\"channels\": [\"a\",\"b\",\"c\",\"d\",\"e\",\"f\",\"g\"] } ]";
 
     @TempDir
     Path folder;
@@ -56,6 +64,42 @@ class StudyWriterTest {
         StudyWriter.write(study, folder.resolve("again.json"));
 
         assertEquals(study, StudyReader.read(folder.resolve("again.json")).study());
+    }
+
+    @Test
+    void namedPlatesAndTextSettingsReadBack() throws IOException {
+        Study study = new StudyFolder(folder)
+                .with(FIRST_TRIAL, FIRST_TRIAL + ", \"plateFile\": \"S01/standing.c3d\"")
+                .with("\"up\": \"+z\"", NAMED_PLATES)
+                .read()
+                .study();
+
+        StudyWriter.write(study, folder.resolve("again.json"));
+
+        assertEquals(study, StudyReader.read(folder.resolve("again.json")).study());
+    }
+
+    @Test
+    void namedPlatesAndTextSettingsAreReadAsTheyStand() throws IOException {
+        Trial trial = new StudyFolder(folder)
+                .with(FIRST_TRIAL, FIRST_TRIAL + ", \"plateFile\": \"S01/standing.c3d\"")
+                .with("\"up\": \"+z\"", NAMED_PLATES)
+                .read()
+                .study()
+                .subjects()
+                .get(0)
+                .trials()
+                .get(0);
+
+        assertEquals(Optional.of("S01/standing.c3d"), trial.plateFile());
+        assertEquals(
+                new TextSettings(Optional.of(150.0), Optional.of(450.0), List.of("u", "v")),
+                trial.lab().text());
+        NamedPlate plate = trial.lab().namedPlates().get(0);
+        assertTrue(plate.labAxes());
+        assertEquals(List.of("a", "b", "c", "d", "e", "f", "g"), plate.channels());
+        assertEquals(LengthUnit.MM, plate.channelUnit());
+        assertEquals(List.of(), trial.lab().plates().stream().toList());
     }
 
     @Test

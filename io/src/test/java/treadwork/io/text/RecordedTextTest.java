@@ -8,7 +8,7 @@ import java.nio.file.Path;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import treadwork.model.capture.Capture;
-import treadwork.model.study.TextSettings;
+import treadwork.model.study.LabSettings;
 
 /** Open recordings that were published as text. */
 class RecordedTextTest {
@@ -18,8 +18,7 @@ class RecordedTextTest {
         Capture capture = TextReader.read(
                 TextFile.of(recording("walk2_markers.tsv")),
                 Optional.of(TextFile.of(recording("walk2_forces.tsv"))),
-                Optional.empty(),
-                TextSettings.DEFAULT);
+                LabSettings.DEFAULT);
 
         // counts and rates as the recording's own description states them
         assertEquals(251, capture.frames());
@@ -34,8 +33,8 @@ class RecordedTextTest {
 
     @Test
     void aLegWithItsForcesIsReadFromOneFile() {
-        Capture capture = TextReader.read(
-                TextFile.of(recording("gait_one_leg_d.txt")), Optional.empty(), Optional.empty(), TextSettings.DEFAULT);
+        Capture capture =
+                TextReader.read(TextFile.of(recording("gait_one_leg_d.txt")), Optional.empty(), LabSettings.DEFAULT);
 
         assertEquals(159, capture.frames());
         assertEquals(150, capture.pointRate());

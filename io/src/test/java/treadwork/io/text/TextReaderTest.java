@@ -14,9 +14,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import treadwork.model.capture.Capture;
-import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
+import treadwork.model.study.LabSettings;
 import treadwork.model.study.TextSettings;
 
 /** Small invented texts; every expected position is what stands in the text, in metres. */
@@ -94,10 +94,82 @@ class TextReaderTest {
     }
 
     @Test
+    void aQuotedCellMayHoldTheDelimiter() {
+        assertPlain(
+                read(
+                        "time,A_x,A_y,A_z,Fz1\n\"0\",\"1000,5\",\"2\",\"3\",\"7\"\n\"0,01\",\"1001,5\",2,3,8\n\"0,02\",0,0,0,9\n"));
+    }
+
+    @Test
+    void lettersAfterManyNumbersTellTheEncodingToo() {
+        StringBuilder text = new StringBuilder("time,A_x,A_y,A_z,Fz1\n");
+        for (int i = 0; i < 10_000; i++) {
+            text.append(i / 100.0).append(",1500,2,3,7\n");
+        }
+        byte[] bytes = text.append("100,1500,2,3,\u00e9").toString().getBytes(StandardCharsets.ISO_8859_1);
+
+        UnusableInputException refused =
+                assertThrows(UnusableInputException.class, () -> read(bytes, TextSettings.DEFAULT));
+
+        assertTrue(
+                refused.finding().line().contains("line 10002, column 5 \"Fz1\": \"\u00e9\""),
+                refused.finding().line());
+    }
+
+    @Test
     void aStatedRateGoesBeforeACountOfRows() {
         String text = "rate: 120 Hz\nTime,A_x,A_y,A_z\n1,1500,2,3\n2,1500,2,3\n3,1500,2,3\n";
 
         assertEquals(120, read(text).pointRate());
+    }
+
+    /** A label that could be a moment's, at 100 mm from another marker, over 1 m. */
+    @Test
+    void aMarkerThatIsCarriedAlongIsNoChannelWhateverItsLabel() {
+        Capture capture = read(walk("M1", 100, 0));
+
+        assertEquals(
+                List.of("A", "M1"),
+                capture.points().stream().map(point -> point.label()).toList());
+        assertEquals(0, capture.samplesPerFrame());
+        assertTrue(codes(capture).contains("text-markers"));
+    }
+
+    @Test
+    void aForceThatLooksLikeAPositionIsAChannel() {
+        Capture capture = read(walk("F1", 0, 700));
+
+        assertEquals(1, capture.points().size());
+        assertEquals("F1_x", capture.analog().get(0).label());
+        assertTrue(codes(capture).contains("text-channels"));
+    }
+
+    @Test
+    void whereTheChannelsAreNamedEveryOtherTripleIsAMarker() {
+        TextSettings settings = new TextSettings(Optional.empty(), Optional.empty(), List.of("A_x"));
+
+        Capture capture = read(bytes(walk("F1", 0, 700)), settings);
+
+        assertEquals("F1", capture.points().get(0).label());
+    }
+
+    @Test
+    void ofAStandingCaptureEveryTripleIsAMarker() {
+        Capture capture = TextReader.markers(TextFile.of("s.csv", bytes(walk("T1", 0, 0))), LabSettings.DEFAULT);
+
+        assertEquals(2, capture.points().size());
+        assertEquals(0, capture.analog().size());
+    }
+
+    /** A marker that goes 1 m, and three columns that keep an offset from it or pulse on their own, both in mm. */
+    private static String walk(String label, double offset, double pulse) {
+        StringBuilder text = new StringBuilder("time,A_x,A_y,A_z,L_x,L_y,L_z\n".replace("L", label));
+        for (int i = 0; i < 101; i++) {
+            double x = 500 + 10 * i;
+            double own = pulse > 0 ? 20 : x + offset;
+            text.append(i / 100.0 + "," + x + ",2,900," + own + ",30," + (880 - pulse * Math.sin(i / 32.0)) + "\n");
+        }
+        return text.toString();
     }
 
     @Test
@@ -120,8 +192,7 @@ class TextReaderTest {
         Capture capture = TextReader.read(
                 TextFile.of("points.csv", bytes(PLAIN)),
                 Optional.of(TextFile.of("plates.csv", bytes(plates.toString()))),
-                Optional.of(LengthUnit.MM),
-                TextSettings.DEFAULT);
+                lab(TextSettings.DEFAULT));
 
         assertEquals(2, capture.frames());
         assertEquals(4, capture.samplesPerFrame());
@@ -141,6 +212,8 @@ class TextReaderTest {
                 "text-cell | `t,A_x,A_y,A_z#0,1,2,3#1,1,two,3` | line 3, column 3 \"A_y\"",
                 "text-cell | `t;A_x;A_y;A_z#0;1,5;2;3#1;1,5;2,5;3#2;1.5;2;3` | line 4, column 2",
                 "text-time-uneven | `t,A_x,A_y,A_z#0,1,2,3#0.1,1,2,3#0.2,1,2,3#0.4,1,2,3` | line 5",
+                "text-time-uneven | `t,A_x,A_y,A_z#0,1,2,3##0.1,1,2,3##0.2,1,2,3#0.4,1,2,3` | line 7",
+                "text-ragged | `t,A_x,A_y,A_z#0,1,2,3##1,1,2` | line 4",
                 "text-rate | `time,A_x,A_y,A_z#1,1,2,3#2,1,2,3#3,1,2,3` | only counts the rows",
                 "text-rate | `A_x,A_y,A_z#1,2,3#1,2,3` | neither a time column",
                 "text-column-twice | `t,A_x,A_x,A_z#0,1,2,3#1,1,2,3` | column 3",
@@ -173,6 +246,8 @@ class TextReaderTest {
                 Numbers numbers = new Numbers(bytes(text), '.');
 
                 assertEquals(Double.parseDouble(text), numbers.parse(0, text.length()), text);
+                double plain = numbers.plain(0, text.length(), (byte) ',');
+                assertEquals(numbers.next() < 0 ? Double.NaN : Double.parseDouble(text), plain, text);
             }
         }
     }
@@ -233,6 +308,10 @@ class TextReaderTest {
     }
 
     private static Capture read(byte[] bytes, TextSettings settings) {
-        return TextReader.read(TextFile.of("bad.csv", bytes), Optional.empty(), Optional.empty(), settings);
+        return TextReader.read(TextFile.of("bad.csv", bytes), Optional.empty(), lab(settings));
+    }
+
+    private static LabSettings lab(TextSettings settings) {
+        return new LabSettings(Optional.empty(), Optional.empty(), Optional.empty(), settings, List.of());
     }
 }

@@ -12,7 +12,6 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
-import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.file.JsonText;
 import treadwork.io.study.StudyReader;
@@ -20,7 +19,6 @@ import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
-import treadwork.model.study.TextSettings;
 import treadwork.solver.run.Inspection;
 import treadwork.solver.run.StudyInspection;
 
@@ -85,8 +83,7 @@ final class InspectCommand implements Callable<Integer> {
     }
 
     private Capture read(Path file) {
-        ReadOptions options = new ReadOptions(Optional.ofNullable(unit), true);
-        return CaptureFiles.read(file, Optional.empty(), options, TextSettings.DEFAULT);
+        return CaptureFiles.read(file, Optional.ofNullable(unit));
     }
 
     private void print(Map<String, Inspection> inspected, Map<String, Finding> unusable) {

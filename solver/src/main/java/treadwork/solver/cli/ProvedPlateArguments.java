@@ -6,7 +6,7 @@ import java.util.Optional;
 import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.TypeConversionException;
-import treadwork.io.c3d.C3dReader;
+import treadwork.io.capture.CaptureFiles;
 import treadwork.model.capture.Capture;
 import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
@@ -41,7 +41,7 @@ final class ProvedPlateArguments {
     boolean json;
 
     Capture read(Path file) {
-        return C3dReader.read(file, Optional.ofNullable(unit));
+        return CaptureFiles.read(file, Optional.ofNullable(unit));
     }
 
     LabAxis up(Capture capture) {

@@ -3,6 +3,7 @@ package treadwork.solver.run;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.atomic.AtomicInteger;
+import treadwork.io.capture.CaptureFiles;
 import treadwork.io.result.InputFile;
 import treadwork.io.study.StudyDocument;
 import treadwork.model.capture.Capture;
@@ -44,6 +45,7 @@ final class StandingCaptures {
 
     private Standing read(Subject subject, Trial trial) {
         InputFile input = InputFile.of(subject.staticFile(), document.pathOf(subject.staticFile()));
-        return new Standing(new TrialCaptures(document).standing(subject, trial), input);
+        Capture capture = CaptureFiles.standing(document.pathOf(subject.staticFile()), trial.lab());
+        return new Standing(capture, input);
     }
 }

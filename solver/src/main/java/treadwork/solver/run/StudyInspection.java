@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import treadwork.io.capture.CaptureFiles;
 import treadwork.io.inertia.InertiaTables;
 import treadwork.io.study.FolderName;
 import treadwork.io.study.StudyDocument;
@@ -35,17 +36,18 @@ public final class StudyInspection {
     }
 
     private static List<Inspected> of(StudyDocument document, Subject subject) {
-        TrialCaptures captures = new TrialCaptures(document);
         List<Inspected> inspected = new ArrayList<>();
         Optional<Capture> standing = Optional.empty();
         for (Trial trial : subject.trials()) {
             String name = subject.id() + "/" + FolderName.ofTrial(trial.file());
             try {
-                Capture stood = standing.orElseGet(() -> captures.standing(subject, trial));
+                Capture stood = standing.orElseGet(
+                        () -> CaptureFiles.standing(document.pathOf(subject.staticFile()), trial.lab()));
                 standing = Optional.of(stood);
                 TrialInput input = new TrialInput(
                         stood,
-                        captures.movement(trial),
+                        CaptureFiles.movement(
+                                document.pathOf(trial.file()), trial.plateFile().map(document::pathOf), trial.lab()),
                         subject,
                         trial,
                         InertiaTables.load(trial.body().inertia()));

@@ -9,6 +9,7 @@ import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.function.Consumer;
+import treadwork.io.capture.CaptureFiles;
 import treadwork.io.inertia.InertiaTables;
 import treadwork.io.result.InputFile;
 import treadwork.io.result.ResultCapture;
@@ -131,7 +132,7 @@ public final class StudyRun {
             return new TrialOutcome(
                     job.name(), trial.condition(), TrialOutcome.Status.UP_TO_DATE, folder, Optional.empty(), List.of());
         }
-        Capture movement = new TrialCaptures(document).movement(trial);
+        Capture movement = movement(trial);
         ComputedTrial computed = TrialComputation.compute(new TrialInput(
                 stood.capture(),
                 movement,
@@ -156,5 +157,10 @@ public final class StudyRun {
         inputs.add(InputFile.of(trial.file(), document.pathOf(trial.file())));
         trial.plateFile().ifPresent(plates -> inputs.add(InputFile.of(plates, document.pathOf(plates))));
         return inputs;
+    }
+
+    private Capture movement(Trial trial) {
+        return CaptureFiles.movement(
+                document.pathOf(trial.file()), trial.plateFile().map(document::pathOf), trial.lab());
     }
 }
