@@ -26,11 +26,6 @@ final class ClusterGuesses {
     /** From the long axis of a limb to a marker on it, m. */
     private static final double FARTHEST = 0.17;
 
-    /** Hip centre below the ASISs, and beside the middle, of a body of {@link Template#STATURE}, m. */
-    private static final double HIP_BELOW_ASIS = 0.09;
-
-    private static final double HIP_OUT = 0.087;
-
     private final Anatomy anatomy;
     private final Rigidity rigidity;
     private final Map<Landmark, Guess> landmarks;
@@ -53,7 +48,7 @@ final class ClusterGuesses {
             Optional<Vector3> knee = limb.middle(limb.knee());
             Optional<Vector3> ankle = limb.middle(limb.ankle());
             if (knee.isPresent() && ankle.isPresent()) {
-                Bone thigh = new Bone(hip(), knee.orElseThrow());
+                Bone thigh = new Bone(hip(knee.orElseThrow()), knee.orElseThrow());
                 Bone shank = new Bone(knee.orElseThrow(), ankle.orElseThrow());
                 List<String> atKnee = recorded(side, "lateral_epicondyle", "medial_epicondyle");
                 List<String> atAnkle = recorded(side, "lateral_malleolus", "medial_malleolus");
@@ -74,10 +69,12 @@ final class ClusterGuesses {
         }
     }
 
-    private Vector3 hip() {
+    /** Of a limb seen as a right one: from the ASISs where they are known, else straight above the knee. */
+    private Vector3 hip(Vector3 knee) {
         double scale = anatomy.stature() / Template.STATURE;
-        double height = (Template.ASIS_HEIGHT.from().y() - HIP_BELOW_ASIS) * scale;
-        return new Vector3(0, height, HIP_OUT * scale);
+        Vector3 usual = Template.ASIS_HEIGHT.from().times(scale).plus(new Vector3(knee.x(), 0, 0));
+        Vector3 down = Template.HIP_CENTRE.from().times(scale);
+        return anatomy.hips().middle().map(middle -> middle.plus(down)).orElse(usual.plus(new Vector3(0, down.y(), down.z())));
     }
 
     private List<String> pelvis() {
@@ -89,7 +86,7 @@ final class ClusterGuesses {
                 .collect(Collectors.toCollection(ArrayList::new));
         if (marks.size() < LEAST_MARKERS) {
             double scale = anatomy.stature() / Template.STATURE;
-            double asis = Template.ASIS_HEIGHT.from().y() * scale;
+            double asis = anatomy.hips().middle().map(Vector3::y).orElse(Template.ASIS_HEIGHT.from().y() * scale);
             anatomy.hips().spots().stream()
                     .filter(spot -> Math.abs(spot.at().y() - asis) < 0.12 * scale
                             && Math.abs(spot.at().z()) < 0.2 * scale)

@@ -1,6 +1,7 @@
 package treadwork.solver.draft;
 
 import java.util.List;
+import java.util.Optional;
 import treadwork.model.space.Vector3;
 
 /** The landmarks of the pelvis, among markers of both sides. */
@@ -36,6 +37,14 @@ record Hips(List<Spot> spots, double stature) {
             }
         }
         return shares;
+    }
+
+    /** Midway between the best pair of ASISs. */
+    Optional<Vector3> middle() {
+        Shares shares = shares();
+        return shares.best(0) < 0 || shares.best(1) < 0
+                ? Optional.empty()
+                : Optional.of(spots.get(shares.best(0)).at().midpoint(spots.get(shares.best(1)).at()));
     }
 
     private double[][] costs(Vector3 middle) {
