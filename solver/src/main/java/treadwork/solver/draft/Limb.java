@@ -89,7 +89,11 @@ record Limb(List<Spot> spots, double stature) {
     Shares foot(Shares ankle) {
         List<Integer> on = onFoot(ankle);
         Shares shares = new Shares(FOOT.size(), on.size());
-        double[] nobody = FOOT.stream().mapToDouble(slot -> Template.NOBODY).toArray();
+        double[] nobody = FOOT.stream()
+                .mapToDouble(slot -> slot == Template.SECOND_HEAD || slot == Template.TOE_TIP
+                        ? Template.NOBODY_OPTIONAL
+                        : Template.NOBODY)
+                .toArray();
         for (double degrees = TOE_OUT - 3 * TOE_OUT_SPREAD; degrees <= TOE_OUT + 3 * TOE_OUT_SPREAD; degrees += 3) {
             double off = (degrees - TOE_OUT) / TOE_OUT_SPREAD;
             double sine = Math.sin(Math.toRadians(degrees));

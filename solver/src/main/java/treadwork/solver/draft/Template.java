@@ -17,6 +17,9 @@ record Template(Vector3 from, Vector3 spread) {
     /** The cost of a landmark that has no marker: 0.3 % of a χ² of three degrees lie beyond it. */
     static final double NOBODY = 14;
 
+    /** The same of landmarks that many laboratories leave out. */
+    static final double NOBODY_OPTIONAL = 10;
+
     static final Template KNEE_HEIGHT = new Template(new Vector3(0, 0.5, 0.085), new Vector3(1, 0.022, 0.05));
     static final Template ANKLE_HEIGHT = new Template(new Vector3(0, 0.078, 0.085), new Vector3(1, 0.014, 0.06));
     static final Template ASIS_HEIGHT = new Template(new Vector3(0, 0.99, 0), new Vector3(1, 0.035, 0.025));
