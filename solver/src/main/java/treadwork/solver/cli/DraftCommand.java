@@ -52,8 +52,9 @@ final class DraftCommand implements Callable<Integer> {
     private static void print(StudyDraft.Person person, PrintWriter out) {
         out.println("Subject " + person.id());
         out.println("  standing: " + person.staticFile() + ". " + person.staticRemark());
-        person.trials().forEach(trial ->
-                out.println("  " + (trial.isUsed() ? "movement: " : "left out: ") + trial.file() + ". " + trial.remark()));
+        person.trials()
+                .forEach(trial -> out.println(
+                        "  " + (trial.isUsed() ? "movement: " : "left out: ") + trial.file() + ". " + trial.remark()));
         out.println("  " + person.massRemark());
         person.markers().remarks().forEach(remark -> out.println("  " + remark));
         person.markers().landmarks().forEach(line -> print(line, out));
@@ -62,7 +63,7 @@ final class DraftCommand implements Callable<Integer> {
     }
 
     private static void print(MarkersDraft.Line line, PrintWriter out) {
-        out.println("  " + (line.isUsed() ? "" : "not used: ") + line.key() + " = " + String.join(", ", line.labels()) + ". "
-                + line.comment());
+        out.println("  " + (line.isUsed() ? "" : "not used: ") + line.key() + " = " + String.join(", ", line.labels())
+                + ". " + line.comment());
     }
 }

@@ -26,17 +26,19 @@ final class ClusterGuesses {
     /** From the long axis of a limb to a marker on it, m. */
     private static final double FARTHEST = 0.17;
 
+    private static final List<String> KNEE = List.of("lateral_epicondyle", "medial_epicondyle");
+    private static final List<String> ANKLE = List.of("lateral_malleolus", "medial_malleolus");
+
     private final Anatomy anatomy;
     private final Rigidity rigidity;
     private final Map<Landmark, Guess> landmarks;
-    private final boolean tellsSides;
     private final Set<String> taken;
+    private final Set<String> inCluster = new LinkedHashSet<>();
 
-    ClusterGuesses(Anatomy anatomy, Rigidity rigidity, List<Guess> landmarks, boolean tellsSides) {
+    ClusterGuesses(Anatomy anatomy, Rigidity rigidity, List<Guess> landmarks) {
         this.anatomy = anatomy;
         this.rigidity = rigidity;
         this.landmarks = landmarks.stream().collect(Collectors.toMap(Guess::landmark, guess -> guess));
-        this.tellsSides = tellsSides;
         this.taken = landmarks.stream().map(Guess::label).collect(Collectors.toCollection(LinkedHashSet::new));
     }
 
@@ -50,8 +52,8 @@ final class ClusterGuesses {
             if (knee.isPresent() && ankle.isPresent()) {
                 Bone thigh = new Bone(hip(knee.orElseThrow()), knee.orElseThrow());
                 Bone shank = new Bone(knee.orElseThrow(), ankle.orElseThrow());
-                List<String> atKnee = recorded(side, "lateral_epicondyle", "medial_epicondyle");
-                List<String> atAnkle = recorded(side, "lateral_malleolus", "medial_malleolus");
+                List<String> atKnee = recorded(side, KNEE);
+                List<String> atAnkle = recorded(side, ANKLE);
                 add(clusters, Segment.of(SegmentKind.THIGH, side), along(limb, thigh, List.of(atKnee)));
                 add(clusters, Segment.of(SegmentKind.SHANK, side), along(limb, shank, List.of(atAnkle, atKnee)));
                 add(clusters, Segment.of(SegmentKind.FOOT, side), foot(limb, side));
@@ -74,7 +76,10 @@ final class ClusterGuesses {
         double scale = anatomy.stature() / Template.STATURE;
         Vector3 usual = Template.ASIS_HEIGHT.from().times(scale).plus(new Vector3(knee.x(), 0, 0));
         Vector3 down = Template.HIP_CENTRE.from().times(scale);
-        return anatomy.hips().middle().map(middle -> middle.plus(down)).orElse(usual.plus(new Vector3(0, down.y(), down.z())));
+        return anatomy.hips()
+                .middle()
+                .map(middle -> middle.plus(down))
+                .orElse(usual.plus(new Vector3(0, down.y(), down.z())));
     }
 
     private List<String> pelvis() {
@@ -86,7 +91,10 @@ final class ClusterGuesses {
                 .collect(Collectors.toCollection(ArrayList::new));
         if (marks.size() < LEAST_MARKERS) {
             double scale = anatomy.stature() / Template.STATURE;
-            double asis = anatomy.hips().middle().map(Vector3::y).orElse(Template.ASIS_HEIGHT.from().y() * scale);
+            double asis = anatomy.hips()
+                    .middle()
+                    .map(Vector3::y)
+                    .orElse(Template.ASIS_HEIGHT.from().y() * scale);
             anatomy.hips().spots().stream()
                     .filter(spot -> Math.abs(spot.at().y() - asis) < 0.12 * scale
                             && Math.abs(spot.at().z()) < 0.2 * scale)
@@ -130,8 +138,7 @@ final class ClusterGuesses {
     }
 
     private List<String> foot(Limb limb, Side side) {
-        List<String> marks = new ArrayList<>(recorded(
-                side, "heel", "first_metatarsal_head", "fifth_metatarsal_head", "second_metatarsal_head", "toe_tip"));
+        List<String> marks = new ArrayList<>(recorded(side, LandmarkGuesses.FOOT));
         limb.onFoot(limb.ankle()).stream()
                 .map(i -> limb.spots().get(i).label())
                 .filter(label -> !taken.contains(label) && rigidity.isRecorded(label))
@@ -141,15 +148,16 @@ final class ClusterGuesses {
         return marks;
     }
 
-    private List<String> recorded(Side side, String... names) {
-        return java.util.Arrays.stream(names)
+    private List<String> recorded(Side side, List<String> names) {
+        return names.stream()
                 .map(name -> landmarks.get(Landmark.of(side, name)))
                 .filter(guess -> guess != null && rigidity.isRecorded(guess.label()))
                 .map(Guess::label)
                 .toList();
     }
 
-    private void add(List<ClusterGuess> clusters, Segment segment, List<String> labels) {
+    private void add(List<ClusterGuess> clusters, Segment segment, List<String> found) {
+        List<String> labels = found.stream().filter(inCluster::add).toList();
         if (labels.size() >= LEAST_MARKERS) {
             double change = labels.stream()
                     .mapToDouble(label -> rigidity.change(
@@ -159,10 +167,30 @@ final class ClusterGuesses {
                                     .toList()))
                     .average()
                     .orElse(Double.NaN);
-            boolean sure = change < Rigidity.LIMIT && (tellsSides || segment == Segment.PELVIS);
+            boolean sure = change < Rigidity.LIMIT && hasAxes(segment);
             String why = String.format(
                     Locale.ROOT, "their distances change by %.1f mm in the mean as they move", 1000 * change);
             clusters.add(new ClusterGuess(segment, labels, sure, why));
         }
+    }
+
+    /** Whether the landmarks that give the segment its axes are sure; without them the cluster cannot be used. */
+    private boolean hasAxes(Segment segment) {
+        if (segment == Segment.PELVIS) {
+            boolean front = isSure(Landmark.RIGHT_ASIS) && isSure(Landmark.LEFT_ASIS);
+            return front && (isSure(Landmark.SACRUM) || (isSure(Landmark.RIGHT_PSIS) && isSure(Landmark.LEFT_PSIS)));
+        }
+        Side side = segment.side().orElseThrow();
+        List<String> names = switch (segment.kind()) {
+            case PELVIS -> List.of();
+            case THIGH -> KNEE;
+            case SHANK -> List.of(KNEE.get(0), KNEE.get(1), ANKLE.get(0), ANKLE.get(1));
+            case FOOT -> List.of(ANKLE.get(0), ANKLE.get(1), "heel", "first_metatarsal_head", "fifth_metatarsal_head");
+        };
+        return names.stream().allMatch(name -> isSure(Landmark.of(side, name)));
+    }
+
+    private boolean isSure(Landmark landmark) {
+        return landmarks.containsKey(landmark) && landmarks.get(landmark).isSure();
     }
 }

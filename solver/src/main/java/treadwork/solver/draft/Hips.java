@@ -44,7 +44,9 @@ record Hips(List<Spot> spots, double stature) {
         Shares shares = shares();
         return shares.best(0) < 0 || shares.best(1) < 0
                 ? Optional.empty()
-                : Optional.of(spots.get(shares.best(0)).at().midpoint(spots.get(shares.best(1)).at()));
+                : Optional.of(spots.get(shares.best(0))
+                        .at()
+                        .midpoint(spots.get(shares.best(1)).at()));
     }
 
     private double[][] costs(Vector3 middle) {

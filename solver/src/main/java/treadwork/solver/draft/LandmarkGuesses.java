@@ -12,7 +12,7 @@ record LandmarkGuesses(Anatomy anatomy, boolean tellsSides) {
     /** Below it a landmark is proposed but not used. */
     static final double LEAST_CONFIDENCE = 0.9;
 
-    private static final List<String> FOOT =
+    static final List<String> FOOT =
             List.of("heel", "first_metatarsal_head", "fifth_metatarsal_head", "second_metatarsal_head", "toe_tip");
 
     List<Guess> all() {

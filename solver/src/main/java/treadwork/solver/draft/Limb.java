@@ -25,6 +25,9 @@ record Limb(List<Spot> spots, double stature) {
     private static final List<Template> FOOT =
             List.of(Template.HEEL, Template.FIRST_HEAD, Template.FIFTH_HEAD, Template.SECOND_HEAD, Template.TOE_TIP);
 
+    /** In {@link #FOOT}, from here on landmarks that many laboratories leave out. */
+    private static final int FIRST_OPTIONAL = 3;
+
     Limb {
         spots = List.copyOf(spots);
     }
@@ -89,10 +92,8 @@ record Limb(List<Spot> spots, double stature) {
     Shares foot(Shares ankle) {
         List<Integer> on = onFoot(ankle);
         Shares shares = new Shares(FOOT.size(), on.size());
-        double[] nobody = FOOT.stream()
-                .mapToDouble(slot -> slot == Template.SECOND_HEAD || slot == Template.TOE_TIP
-                        ? Template.NOBODY_OPTIONAL
-                        : Template.NOBODY)
+        double[] nobody = IntStream.range(0, FOOT.size())
+                .mapToDouble(slot -> slot < FIRST_OPTIONAL ? Template.NOBODY : Template.NOBODY_OPTIONAL)
                 .toArray();
         for (double degrees = TOE_OUT - 3 * TOE_OUT_SPREAD; degrees <= TOE_OUT + 3 * TOE_OUT_SPREAD; degrees += 3) {
             double off = (degrees - TOE_OUT) / TOE_OUT_SPREAD;

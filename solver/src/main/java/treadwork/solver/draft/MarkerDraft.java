@@ -54,7 +54,7 @@ public record MarkerDraft(
         Anatomy anatomy = Anatomy.of(body.spots());
         boolean tellsSides = body.facing().tellsSides();
         List<Guess> landmarks = new LandmarkGuesses(anatomy, tellsSides).all();
-        List<ClusterGuess> clusters = new ClusterGuesses(anatomy, new Rigidity(movements), landmarks, tellsSides).all();
+        List<ClusterGuess> clusters = new ClusterGuesses(anatomy, new Rigidity(movements), landmarks).all();
         return new MarkerDraft(
                 upright.axis(),
                 upright.isFromPlates(),

@@ -49,7 +49,9 @@ public final class Stillness {
     public static double shared(Capture movement, Capture standing) {
         var there = Places.courses(standing).keySet();
         var here = Places.courses(movement).keySet();
-        return here.isEmpty() ? 0 : (double) here.stream().filter(there::contains).count() / here.size();
+        return here.isEmpty()
+                ? 0
+                : (double) here.stream().filter(there::contains).count() / here.size();
     }
 
     private static double motion(VectorSeries course) {

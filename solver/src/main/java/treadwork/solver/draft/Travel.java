@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import treadwork.model.capture.Capture;
+import treadwork.model.space.Rotation;
 import treadwork.model.space.Vector3;
 import treadwork.model.space.VectorSeries;
 
@@ -29,7 +30,7 @@ final class Travel {
             Vector3 way = level(way(Places.courses(movement)), up);
             if (way.norm() > LEAST_WAY) {
                 double turn = turn(standing, Places.courses(movement), up);
-                sum = sum.plus(treadwork.model.space.Rotation.about(up, -turn).times(way.unit()));
+                sum = sum.plus(Rotation.about(up, -turn).times(way.unit()));
                 trials++;
             }
         }

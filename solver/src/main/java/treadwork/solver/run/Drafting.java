@@ -85,8 +85,8 @@ public record Drafting(StudyDraft draft, List<String> passedOver, List<Path> wri
                     ? path.getName(0)
                     : folder.toAbsolutePath().normalize().getFileName();
             try {
-                Capture capture = CaptureFiles.read(
-                        file, Optional.empty(), new ReadOptions(unit, true), TextSettings.DEFAULT);
+                Capture capture =
+                        CaptureFiles.read(file, Optional.empty(), new ReadOptions(unit, true), TextSettings.DEFAULT);
                 groups.computeIfAbsent(id(String.valueOf(group)), key -> new LinkedHashMap<>())
                         .put(capture, name);
             } catch (UnusableInputException e) {
@@ -99,7 +99,10 @@ public record Drafting(StudyDraft draft, List<String> passedOver, List<Path> wri
     private static List<Path> files(Path folder) {
         try (Stream<Path> walk = Files.walk(folder, DEPTH)) {
             return walk.filter(Files::isRegularFile)
-                    .filter(file -> file.getFileName().toString().toLowerCase(Locale.ROOT).matches(".*\\.(c3d|txt|tsv|csv)"))
+                    .filter(file -> file.getFileName()
+                            .toString()
+                            .toLowerCase(Locale.ROOT)
+                            .matches(".*\\.(c3d|txt|tsv|csv)"))
                     .limit(MOST_FILES)
                     .sorted()
                     .toList();
@@ -136,7 +139,8 @@ public record Drafting(StudyDraft draft, List<String> passedOver, List<Path> wri
             } else if (capture != standing) {
                 double shared = Stillness.shared(capture, standing);
                 boolean isUsed = shared >= LEAST_SHARED;
-                String remark = String.format(Locale.ROOT, "%.0f %% of its markers are in the standing capture.", 100 * shared);
+                String remark =
+                        String.format(Locale.ROOT, "%.0f %% of its markers are in the standing capture.", 100 * shared);
                 trials.add(new StudyDraft.Recording(
                         name, isUsed, isUsed ? remark : remark + " Give the trial a markerSet of its own to use it."));
                 if (isUsed) {
