@@ -1,6 +1,7 @@
 package treadwork.solver.draft;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -12,6 +13,9 @@ final class Shares {
     /** A slot without a marker. */
     static final int NOBODY = -1;
 
+    /** A marker that costs so much more than none is not tried: exp(-10/2) = 0.7 %. */
+    private static final double NEGLIGIBLE = 10;
+
     private final double[][] weights;
     private double total;
     private double least = Double.POSITIVE_INFINITY;
@@ -20,7 +24,7 @@ final class Shares {
     Shares(int slots, int spots) {
         weights = new double[slots][spots + 1];
         best = new int[slots];
-        java.util.Arrays.fill(best, NOBODY);
+        Arrays.fill(best, NOBODY);
     }
 
     /** One whole assignment, a marker's number or {@link #NOBODY} a slot, and its cost (-2 ln of its likelihood). */
@@ -59,11 +63,23 @@ final class Shares {
      */
     void addAll(double[][] costs, double[] nobody, int[] start, double before) {
         int slots = weights.length;
-        int[] assigned = java.util.Arrays.copyOf(start, slots);
+        int[] assigned = Arrays.copyOf(start, slots);
         fill(new Search(costs, nobody, start.length, assigned), start.length, before);
     }
 
-    private record Search(double[][] costs, double[] nobody, int fixed, int[] assigned) {
+    private static final class Search {
+
+        private final double[][] costs;
+        private final double[] nobody;
+        private final int fixed;
+        private final int[] assigned;
+
+        Search(double[][] costs, double[] nobody, int fixed, int[] assigned) {
+            this.costs = costs;
+            this.nobody = nobody;
+            this.fixed = fixed;
+            this.assigned = assigned;
+        }
 
         /** Markers that are worth trying in a slot. */
         List<Integer> candidates(int slot) {
@@ -86,9 +102,6 @@ final class Shares {
             return false;
         }
     }
-
-    /** exp(-10/2) = 0.7 %. */
-    private static final double NEGLIGIBLE = 10;
 
     private void fill(Search search, int slot, double cost) {
         if (slot == weights.length) {

@@ -1,5 +1,6 @@
 package treadwork.solver.draft;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -32,7 +33,7 @@ public final class StandingMass {
         double newtons = 0;
         List<PlateLoad> loads = PlateLoads.resolve(standing, standing.plates(), up, Processing.DEFAULT)
                 .plates();
-        List<Plate> loaded = new java.util.ArrayList<>();
+        List<Plate> loaded = new ArrayList<>();
         for (PlateLoad load : loads) {
             double push = Places.median(load.rawPush().toArray());
             if (push > LEAST_LOAD) {
