@@ -134,9 +134,9 @@ public record Drafting(StudyDraft draft, List<String> passedOver, List<Path> wri
         List<Capture> movements = new ArrayList<>();
         List<StudyDraft.Recording> trials = new ArrayList<>();
         captures.forEach((capture, name) -> {
-            if (capture != standing && Stillness.isStanding(capture)) {
+            if (!capture.equals(standing) && Stillness.isStanding(capture)) {
                 passedOver.add(name + ": it keeps still too, with fewer markers");
-            } else if (capture != standing) {
+            } else if (!capture.equals(standing)) {
                 double shared = Stillness.shared(capture, standing);
                 boolean isUsed = shared >= LEAST_SHARED;
                 String remark =

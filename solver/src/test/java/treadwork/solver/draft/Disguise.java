@@ -82,7 +82,7 @@ record Disguise(Capture standing, Capture walking, MarkerSet truth, WalkerSettin
                 .withStrideS(1.0 + 0.3 * random.nextDouble())
                 .withStrideRatio(0.66 + 0.12 * random.nextDouble());
         LabPlan lab = LabPlan.DEFAULT
-                .withUp(LabAxis.values()[random.nextInt(LabAxis.values().length)])
+                .withUp(List.of(LabAxis.values()).get(random.nextInt(LabAxis.values().length)))
                 .withHeadingRad(2 * Math.PI * random.nextDouble());
         return WalkerSettings.DEFAULT.with(figure).with(gait).with(lab);
     }
