@@ -24,6 +24,10 @@ record Hips(List<Spot> spots, double stature) {
     Shares shares() {
         Shares shares = new Shares(2 + BEHIND.size(), spots.size());
         double[] nobody = BEHIND.stream().mapToDouble(slot -> Template.NOBODY).toArray();
+        // One PSIS without the other is of no use, so both or none.
+        double[] bothPsis = nobody.clone();
+        bothPsis[0] = Double.POSITIVE_INFINITY;
+        bothPsis[1] = Double.POSITIVE_INFINITY;
         shares.add(new int[] {-1, -1, -1, -1, -1, -1, -1}, (2 + nobody.length) * Template.NOBODY);
         for (int right = 0; right < spots.size(); right++) {
             for (int left = 0; left < spots.size(); left++) {
@@ -32,7 +36,9 @@ record Hips(List<Spot> spots, double stature) {
                 double cost = Template.ASIS.cost(apart, stature)
                         + Template.ASIS_HEIGHT.cost(new Vector3(0, middle.y(), middle.z()), stature);
                 if (right != left && cost < HOPELESS) {
-                    shares.addAll(costs(middle), nobody, new int[] {right, left}, cost);
+                    int[] front = {right, left};
+                    shares.addAll(costs(middle, true), bothPsis, front, cost);
+                    shares.addAll(costs(middle, false), nobody, front, cost);
                 }
             }
         }
@@ -49,13 +55,15 @@ record Hips(List<Spot> spots, double stature) {
                         .midpoint(spots.get(shares.best(1)).at()));
     }
 
-    private double[][] costs(Vector3 middle) {
+    private double[][] costs(Vector3 middle, boolean withPsis) {
         double[][] costs = new double[BEHIND.size()][spots.size()];
         for (int slot = 0; slot < BEHIND.size(); slot++) {
             for (int i = 0; i < spots.size(); i++) {
                 Vector3 arm = spots.get(i).at().minus(middle);
                 double out = SIDES[slot] < 0 ? -arm.z() : arm.z();
-                costs[slot][i] = BEHIND.get(slot).cost(new Vector3(arm.x(), arm.y(), out), stature);
+                costs[slot][i] = slot < 2 && !withPsis
+                        ? Double.POSITIVE_INFINITY
+                        : BEHIND.get(slot).cost(new Vector3(arm.x(), arm.y(), out), stature);
             }
         }
         return costs;

@@ -86,7 +86,7 @@ final class Shares {
             List<Integer> worth = new ArrayList<>();
             double[] row = costs[slot - fixed];
             for (int spot = 0; spot < row.length; spot++) {
-                if (row[spot] < nobody[slot - fixed] + NEGLIGIBLE) {
+                if (row[spot] < Math.min(nobody[slot - fixed], Template.NOBODY) + NEGLIGIBLE) {
                     worth.add(spot);
                 }
             }

@@ -34,7 +34,7 @@ record Template(Vector3 from, Vector3 spread) {
     /** From the middle of the ASISs. */
     static final Template PSIS = new Template(new Vector3(-0.155, 0.03, 0.045), new Vector3(0.025, 0.025, 0.012));
 
-    static final Template SACRUM = new Template(new Vector3(-0.165, 0.01, 0), new Vector3(0.025, 0.03, 0.009));
+    static final Template SACRUM = new Template(new Vector3(-0.165, 0.01, 0), new Vector3(0.025, 0.03, 0.012));
     static final Template HIP_CENTRE = new Template(new Vector3(-0.07, -0.09, 0.087), new Vector3(0.02, 0.02, 0.012));
 
     /** From the middle of the malleoli, in the direction of the foot. */
@@ -54,5 +54,10 @@ record Template(Vector3 from, Vector3 spread) {
         double y = (at.y() / scale - from.y()) / spread.y();
         double z = (at.z() / scale - from.z()) / spread.z();
         return x * x + y * y + z * z;
+    }
+
+    /** To the point midway, such as a computed joint centre. */
+    Template halved() {
+        return new Template(from.times(1.0 / 2), spread.times(1 / Math.sqrt(2)));
     }
 }
