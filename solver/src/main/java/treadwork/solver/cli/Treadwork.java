@@ -32,6 +32,7 @@ import picocli.CommandLine.Spec;
         subcommands = {
             DemoCommand.class,
             InspectCommand.class,
+            DraftCommand.class,
             ComputeCommand.class,
             PlatesCommand.class,
             ViewCommand.class,
