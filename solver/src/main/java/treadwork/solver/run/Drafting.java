@@ -12,7 +12,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
 import java.util.stream.Stream;
-import treadwork.io.c3d.ReadOptions;
 import treadwork.io.capture.CaptureFiles;
 import treadwork.io.study.DraftWriter;
 import treadwork.io.study.MarkersDraft;
@@ -22,7 +21,6 @@ import treadwork.model.capture.LengthUnit;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.Severity;
 import treadwork.model.finding.UnusableInputException;
-import treadwork.model.study.TextSettings;
 import treadwork.solver.draft.ClusterGuess;
 import treadwork.solver.draft.Guess;
 import treadwork.solver.draft.MarkerDraft;
@@ -85,8 +83,7 @@ public record Drafting(StudyDraft draft, List<String> passedOver, List<Path> wri
                     ? path.getName(0)
                     : folder.toAbsolutePath().normalize().getFileName();
             try {
-                Capture capture =
-                        CaptureFiles.read(file, Optional.empty(), new ReadOptions(unit, true), TextSettings.DEFAULT);
+                Capture capture = CaptureFiles.read(file, unit);
                 groups.computeIfAbsent(id(String.valueOf(group)), key -> new LinkedHashMap<>())
                         .put(capture, name);
             } catch (UnusableInputException e) {
