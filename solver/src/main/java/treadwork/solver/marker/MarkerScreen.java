@@ -9,6 +9,7 @@ import java.util.Map;
 import treadwork.model.body.Segment;
 import treadwork.model.finding.Finding;
 import treadwork.model.space.VectorSeries;
+import treadwork.model.study.Exchange;
 
 /**
  * The movement's markers, with what is surely not the marker's own place taken as missing.
@@ -27,8 +28,11 @@ public record MarkerScreen(Map<Segment, List<VectorSeries>> courses, List<Findin
     public static MarkerScreen of(List<MarkerCluster> clusters, Recording record) {
         List<Finding> findings = new ArrayList<>();
         Blanks blanks = new Blanks(clusters);
-        for (Swap swap : SwapSearch.in(clusters)) {
-            findings.add(swap.finding(record));
+        List<Swap> swaps = SwapSearch.in(clusters);
+        List<Exchange> exchanges = new ArrayList<>(record.exchanged());
+        swaps.forEach(swap -> exchanges.addAll(swap.exchanges(record.firstFrame())));
+        for (Swap swap : swaps) {
+            findings.add(swap.finding(record, exchanges));
             blanks.add(swap.first(), swap.frames());
             blanks.add(swap.second(), swap.frames());
         }
@@ -50,9 +54,14 @@ public record MarkerScreen(Map<Segment, List<VectorSeries>> courses, List<Findin
     /**
      * Which record the markers are of.
      *
-     * @param rate frames a second
+     * @param rate      frames a second
+     * @param exchanged what the study file has put right already
      */
-    public record Recording(String name, int firstFrame, double rate) {
+    public record Recording(String name, int firstFrame, double rate, List<Exchange> exchanged) {
+
+        public Recording {
+            exchanged = List.copyOf(exchanged);
+        }
 
         String where(MarkerCluster cluster, int marker) {
             return name + ", marker \"" + cluster.labels().get(marker) + "\", "

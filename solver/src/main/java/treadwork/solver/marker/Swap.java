@@ -8,6 +8,7 @@ import treadwork.model.capture.FrameRange;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.Proposal;
 import treadwork.model.finding.Severity;
+import treadwork.model.study.Exchange;
 
 /**
  * Two labels that stand for each other's marker.
@@ -19,11 +20,20 @@ import treadwork.model.finding.Severity;
 record Swap(
         MarkerScreen.MarkerPlace first, MarkerScreen.MarkerPlace second, BitSet frames, double misfit, double mended) {
 
-    Finding finding(MarkerScreen.Recording record) {
+    /** As the study file would state it, a run of frames each. */
+    List<Exchange> exchanges(int firstFrame) {
+        return Frames.runs(frames, firstFrame).stream()
+                .map(run -> new Exchange(first.label(), second.label(), run))
+                .toList();
+    }
+
+    /** @param all the exchanges that the study file should state, this one and every other */
+    Finding finding(MarkerScreen.Recording record, List<Exchange> all) {
         List<FrameRange> runs = Frames.runs(frames, record.firstFrame());
-        String entries = runs.stream()
-                .map(run -> "{ \"labels\": [" + Proposal.quoted(first.label()) + ", " + Proposal.quoted(second.label())
-                        + "], \"frames\": [" + run.first() + ", " + run.last() + "] }")
+        String entries = all.stream()
+                .map(exchange -> "{ \"labels\": [" + Proposal.quoted(exchange.first()) + ", "
+                        + Proposal.quoted(exchange.second()) + "], \"frames\": ["
+                        + exchange.frames().first() + ", " + exchange.frames().last() + "] }")
                 .collect(Collectors.joining(", "));
         return new Finding(
                         "marker-swap",

@@ -108,8 +108,9 @@ final class SwapSearch {
         MarkerCluster other = clusters.get(b);
         double beforeOne = misfit(a, one.courses(), frame);
         double beforeOther = misfit(b, other.courses(), frame);
-        for (int i = 0; i < one.size(); i++) {
-            for (int k = 0; k < other.size(); k++) {
+        List<Integer> strangers = strangers(other, frame);
+        for (int i : strangers.isEmpty() ? strangers : strangers(one, frame)) {
+            for (int k : strangers) {
                 double afterOne =
                         misfit(a, with(one.courses(), i, other.courses().get(k)), frame);
                 double afterOther =
@@ -125,6 +126,24 @@ final class SwapSearch {
                 }
             }
         }
+    }
+
+    /** The markers without which the rest of the cluster has its standing shape: one of them may be another cluster's. */
+    private static List<Integer> strangers(MarkerCluster cluster, int frame) {
+        List<Integer> strangers = new ArrayList<>();
+        for (int marker = 0; marker < cluster.size(); marker++) {
+            boolean restFits = true;
+            for (int one = 0; one < cluster.size(); one++) {
+                for (int other = one + 1; other < cluster.size(); other++) {
+                    double change = cluster.distance(one, other, frame) - cluster.standingDistance(one, other);
+                    restFits &= one == marker || other == marker || !(Math.abs(change) > SUSPECT);
+                }
+            }
+            if (restFits) {
+                strangers.add(marker);
+            }
+        }
+        return strangers;
     }
 
     private static boolean mends(double before, double after) {

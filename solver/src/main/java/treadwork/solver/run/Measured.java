@@ -13,6 +13,7 @@ import treadwork.model.capture.Capture;
 import treadwork.model.capture.Plate;
 import treadwork.model.finding.Finding;
 import treadwork.model.finding.UnusableInputException;
+import treadwork.model.load.Support;
 import treadwork.model.space.Vector3;
 import treadwork.model.space.VectorSeries;
 import treadwork.model.study.LabAxis;
@@ -101,6 +102,18 @@ record Measured(
                 SettingsCheck.of(
                         movement, input.trial().processing(), !plates.plates().isEmpty(), markers),
                 JointGapCheck.of(movement.name(), body, tracked.motions())));
+    }
+
+    /** Whether a foot is on the ground in every frame, as in walking. */
+    boolean isWithoutFlight() {
+        List<List<Support>> feet = List.copyOf(contacts.support().values());
+        for (int i = 0; !feet.isEmpty() && i < feet.get(0).size(); i++) {
+            int frame = i;
+            if (feet.size() > 1 && feet.stream().allMatch(foot -> foot.get(frame) == Support.AIR)) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /** How fast the pelvis, or a foot where it is not tracked, gets on between the first and last frame that know it, m/s. */

@@ -79,7 +79,9 @@ record TrackedBody(
             clusters.add(new MarkerCluster(segment, labels, geometry.cluster(), courses));
         }
         return MarkerScreen.of(
-                clusters, new MarkerScreen.Recording(movement.name(), movement.firstFrame(), movement.pointRate()));
+                clusters,
+                new MarkerScreen.Recording(
+                        movement.name(), movement.firstFrame(), movement.pointRate(), trial.exchanged()));
     }
 
     private static FilledCluster filled(List<VectorSeries> markers, Trial trial, Capture movement) {

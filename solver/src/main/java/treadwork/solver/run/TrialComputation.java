@@ -79,7 +79,7 @@ public final class TrialComputation {
                             peaks.anklePower());
                 })
                 .toList();
-        return RangeCheck.of(movement.name(), measured.speed(), sides);
+        return RangeCheck.of(movement.name(), measured.isWithoutFlight() ? measured.speed() : Double.NaN, sides);
     }
 
     private static List<JointLoads> loads(List<SolvedJoint> joints, TrialInput input) {

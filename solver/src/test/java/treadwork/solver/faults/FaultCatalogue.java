@@ -146,6 +146,14 @@ final class FaultCatalogue {
                         walk.walking(), shank.get(first), shank.get(other), stretch(walk, seconds)));
             }));
         }
+        faults.add(made("marker-swap", "markers of both shanks, each for 0.2 s", true, walk -> {
+            Capture swapped = walk.walking();
+            for (Segment shank : List.of(Segment.RIGHT_SHANK, Segment.LEFT_SHANK)) {
+                List<String> labels = walk.walkingSet().clusters().get(shank);
+                swapped = MarkerFaults.swapped(swapped, labels.get(0), labels.get(2), stretch(walk, 0.2));
+            }
+            return walk.withWalking(swapped);
+        }));
         faults.add(made("marker-swap", "a shank and a thigh marker for 0.2 s", true, walk -> {
             Side side = walk.random().nextBoolean() ? Side.RIGHT : Side.LEFT;
             List<String> shank = walk.walkingSet().clusters().get(Segment.of(SegmentKind.SHANK, side));
