@@ -104,10 +104,10 @@ public final class BodyCheck {
                         standing + ", " + side.key() + " leg",
                         String.format(
                                 Locale.ROOT,
-                                "standing, its hip, knee and ankle are at heights of %.2f, %.2f and %.2f m, each must be below the one before",
-                                hip,
+                                "standing, its knee is %.2f m high and its ankle %.2f m%s; each must be below the one above",
                                 knee,
-                                ankle),
+                                ankle,
+                                thigh == null ? "" : String.format(Locale.ROOT, ", its hip %.2f m", hip)),
                         "Landmarks stand for each other, so segments point the wrong way",
                         "Check the labels of epicondyles, malleoli and the pelvis in the marker set, and which axis points up"));
     }

@@ -17,8 +17,8 @@ public final class SettingsCheck {
     /** Cut-offs that differ by less are the same, as a share. */
     private static final double SAME = 0.01;
 
-    /** Samples in a period of the cut-off that keep a filtered course smooth between them (common practice: 5 to 10). */
-    private static final double LEAST_SAMPLES = 8;
+    /** Samples in a period of the cut-off that keep a filtered course smooth between them (common practice: 5 to 10 times). */
+    private static final double LEAST_SAMPLES = 5;
 
     /** Between two frames a marker's path may bend away from a straight line by this much, m. */
     private static final double LARGEST_BEND = 0.005;

@@ -244,11 +244,11 @@ final class FaultCatalogue {
                         like.markerFilter(), plates, like.longestGapS(), like.contactThresholdN(), like.plateZero()));
             }));
         }
-        for (int hz : new int[] {60, 40, 30}) {
+        for (int hz : new int[] {60, 40, 25}) {
             faults.add(new PlantedFault(
                     "rate-low",
                     "recorded at " + hz + " Hz",
-                    hz == 40,
+                    hz == 25,
                     settings -> settings.with(settings.gait().withPointRate(hz)),
                     UnaryOperator.identity()));
         }
